@@ -1,0 +1,61 @@
+package coilbook.fleet;
+
+import java.math.BigDecimal;
+import java.util.List;
+
+/**
+ * A catalogue entry of a driver module. Which of the electrical values decide depends on {@link #kind()}; the others stay empty. The rectifier
+ * drop is that of the whole bridge. Limits are per channel unless the heading says module.
+ */
+public record DriverType(@Column(value = "Type", key = true) String code, @Column("Maker") String maker,
+        @Column("Status") TypeStatus status, @Column("Kind") DriverKind kind,
+        @Column(value = "Series resistance", unit = Unit.OHM, min = 0, above = true, max = 1e6) Datum seriesResistance,
+        @Column(value = "Series resistance tolerance", unit = Unit.PERCENT, min = 0, max = 0.5) Datum seriesResistanceTolerance,
+        @Column(value = "Series resistor rating", unit = Unit.WATT, min = 0, above = true, max = 1e5) Datum seriesResistorRating,
+        @Column(value = "Capacitance", unit = Unit.MICROFARAD, min = 0, above = true, max = 10) Datum capacitance,
+        @Column(value = "Capacitance tolerance", unit = Unit.PERCENT, min = 0, max = 0.9) Datum capacitanceTolerance,
+        @Column(value = "Rectifier drop", unit = Unit.VOLT, min = 0, max = 20) Datum rectifierDrop,
+        @Column(value = "Switch drop", unit = Unit.VOLT, min = 0, max = 20) Datum switchDrop,
+        @Column(value = "Clamp voltage", unit = Unit.VOLT, min = 0, max = 2000) Datum clampVoltage,
+        @Column(value = "Capacitor voltage rating", unit = Unit.VOLT, min = 0, above = true, max = 5000) Datum capacitorRating,
+        @Column(value = "Switch voltage rating", unit = Unit.VOLT, min = 0, above = true, max = 5000) Datum switchRating,
+        @Column(value = "Bleed resistance", unit = Unit.KILOOHM, min = 0, above = true, max = 1e9) Datum bleedResistance,
+        @Column(value = "Pull-in voltage", unit = Unit.VOLT, min = 0, above = true, max = 1000) Datum pullInVoltage,
+        @Column(value = "Pull-in time", unit = Unit.MILLISECOND, min = 0, above = true, max = 10) Datum pullInTime,
+        @Column(value = "Hold voltage", unit = Unit.VOLT, min = 0, above = true, max = 1000) Datum holdVoltage,
+        @Column("Level change") LevelChange levelChange,
+        @Column(value = "Bus voltage", unit = Unit.VOLT, min = 0, above = true, max = 1000) Datum busVoltage,
+        @Column(value = "Peak current", unit = Unit.AMPERE, min = 0, above = true, max = 1000) Datum peakCurrent,
+        @Column(value = "Peak time", unit = Unit.MILLISECOND, min = 0, above = true, max = 10) Datum peakTime,
+        @Column(value = "Hold current", unit = Unit.AMPERE, min = 0, above = true, max = 1000) Datum holdCurrent,
+        @Column(value = "Output voltage", unit = Unit.VOLT, min = 0, above = true, max = 1000) Datum outputVoltage,
+        @Column("Rectification") Rectification rectification,
+        @Column(value = "Efficiency", unit = Unit.PERCENT, min = 0, above = true, max = 1) Datum efficiency,
+        @Column(value = "Power factor", min = 0, above = true, max = 1) Datum powerFactor,
+        @Column(value = "Standby power", unit = Unit.WATT, min = 0, max = 1e4) Datum standbyPower,
+        @Column(value = "Channels", min = 1, max = 999) Integer channels,
+        @Column("Coils rated kind") CoilKind coilKind,
+        @Column(value = "Coils rated voltage from", unit = Unit.VOLT, min = 0, above = true, max = 1000) Datum coilVoltageFrom,
+        @Column(value = "Coils rated voltage to", unit = Unit.VOLT, min = 0, above = true, max = 1000) Datum coilVoltageTo,
+        @Column(value = "Coils a channel", min = 1, max = 99) Integer coilsPerChannel,
+        @Column("Coil connections allowed") List<String> coilConnections,
+        @Column(value = "Lowest load", unit = Unit.OHM, min = 0, above = true, max = 1e6) Datum lowestLoad,
+        @Column(value = "Output current limit", unit = Unit.AMPERE, min = 0, above = true, max = 1000) Datum outputCurrentLimit,
+        @Column(value = "Module current limit", unit = Unit.AMPERE, min = 0, above = true, max = 1000) Datum moduleCurrentLimit,
+        @Column("Isolated from mains") Boolean isolatedFromMains, @Column("Output earthed") Boolean outputEarthed,
+        @Column("Control input isolated") Boolean controlIsolated,
+        @Column(value = "Control on voltage", unit = Unit.VOLT, min = 0, max = 300) Datum controlOnVoltage,
+        @Column(value = "Control off voltage", unit = Unit.VOLT, min = 0, max = 300) Datum controlOffVoltage,
+        @Column(value = "Control current", unit = Unit.MILLIAMPERE, min = 0, max = 10) Datum controlCurrent,
+        @Column(value = "Control leakage allowed", unit = Unit.MILLIAMPERE, min = 0, max = 10) Datum controlLeakage,
+        @Column("Control polarity") SignalPolarity controlPolarity,
+        @Column(value = "Shortest control pulse", unit = Unit.MILLISECOND, min = 0, max = 10) Datum shortestControlPulse,
+        @Column("Marks") List<String> marks, @Column(value = "Inrush", unit = Unit.AMPERE, min = 0, max = 10000) Datum inrush,
+        @Column("Short-circuit behaviour") ShortCircuitBehaviour shortCircuit,
+        @Column(value = "Timer supply voltage", unit = Unit.VOLT, min = 0, max = 300) Datum timerSupplyVoltage,
+        @Column(value = "Timer supply current", unit = Unit.MILLIAMPERE, min = 0, max = 10) Datum timerSupplyCurrent,
+        @Column(value = "Expected life", unit = Unit.HOUR, min = 0, above = true, max = 1e12) Datum expectedLife,
+        @Column(value = "Price", min = 0) BigDecimal price,
+        @Column(value = "Labour", unit = Unit.MINUTE, min = 0, max = 360000) Datum labour,
+        @Column(value = "Stock on hand", min = 0, max = 1e6) Integer stock, @Column("Source") String source) implements Row {
+}
