@@ -1,0 +1,4 @@
+/**
+ * Waveforms and temperatures drawn as images, without a screen.
+ */
+package coilbook.charts;

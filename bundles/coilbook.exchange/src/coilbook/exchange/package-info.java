@@ -1,0 +1,4 @@
+/**
+ * Spreadsheets in and out: the exchange workbook, the flat list and the audit workbook.
+ */
+package coilbook.exchange;

@@ -1,0 +1,4 @@
+/**
+ * The window: its parts, handlers and grid.
+ */
+package coilbook.workbench;
