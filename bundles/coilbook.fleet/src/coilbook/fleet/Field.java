@@ -143,7 +143,8 @@ public final class Field {
         }
         double number = value instanceof Datum datum ? datum.value() : value instanceof Number plain ? plain.doubleValue() : 0;
         boolean numeric = value instanceof Datum || value instanceof Number;
-        if (numeric && (number < column.min() || column.above() && number <= column.min() || number > column.max() || Double.isNaN(number))) {
+        if (numeric
+                && (number < column.min() || column.above() && number <= column.min() || number > column.max() || Double.isNaN(number))) {
             throw new InvalidValue(heading(), FieldText.format(this, value), FieldText.expected(this));
         }
     }

@@ -151,7 +151,8 @@ public final class FieldText {
         boolean low = field.min() != Double.NEGATIVE_INFINITY;
         boolean high = field.max() != Double.POSITIVE_INFINITY;
         if (low && high) {
-            return noun + (field.above() ? " above " : " from ") + number(field.unit().fromSi(field.min())) + unit + (field.above() ? " up to " : " to ")
+            return noun + (field.above() ? " above " : " from ") + number(field.unit().fromSi(field.min())) + unit
+                    + (field.above() ? " up to " : " to ")
                     + number(field.unit().fromSi(field.max())) + unit;
         } else if (low) {
             return noun + (field.above() ? " above " : " of at least ") + number(field.unit().fromSi(field.min())) + unit;

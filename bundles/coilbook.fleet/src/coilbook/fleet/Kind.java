@@ -32,7 +32,8 @@ public final class Kind<R extends Row> {
             make(MarketTolerance.class, "Mains tolerances"), make(MarketMark.class, "Marks by country"),
             make(FleetSetting.class, "Fleet settings"));
 
-    private static final Map<Class<?>, Kind<?>> BY_CLASS = ALL.stream().collect(Collectors.toUnmodifiableMap(Kind::type, Function.identity()));
+    private static final Map<Class<?>, Kind<?>> BY_CLASS = ALL.stream()
+            .collect(Collectors.toUnmodifiableMap(Kind::type, Function.identity()));
 
     private final Class<R> type;
     private final String id;
@@ -127,8 +128,10 @@ public final class Kind<R extends Row> {
         StringJoiner joined = new StringJoiner("/");
         for (Field field : keyFields) {
             Object part = field.get(row);
-            joined.add(part == null ? "" : part instanceof Labelled term ? term.label() : part instanceof Datum d ? FieldText.format(field, d)
-                    : part.toString());
+            joined.add(part == null ? ""
+                    : part instanceof Labelled term ? term.label()
+                            : part instanceof Datum d ? FieldText.format(field, d)
+                                    : part.toString());
         }
         return joined.toString();
     }

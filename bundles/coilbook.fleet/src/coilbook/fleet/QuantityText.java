@@ -163,7 +163,8 @@ public final class QuantityText {
     }
 
     private static double tidy(double si, Scale scale) {
-        return scale.factor == 1 && scale.offset == 0 ? si : new java.math.BigDecimal(si).round(new java.math.MathContext(15)).doubleValue();
+        return scale.factor == 1 && scale.offset == 0 ? si
+                : new java.math.BigDecimal(si).round(new java.math.MathContext(15)).doubleValue();
     }
 
     private static Scale scale(String unit, Unit expected) {
