@@ -144,17 +144,17 @@ final class CoilBusPiece extends Piece {
     /** What ended the piece, for the state last set. */
     Ending ending() {
         double forward = mains - bridgeDrop - bus;
-        double least = Math.abs(forward);
+        double least = conducting ? forward : -forward;
         Ending ending = Ending.RECTIFIER;
-        if (conducting && Math.abs(bus + bridgeDrop) < least) {
-            least = Math.abs(bus + bridgeDrop);
+        if (conducting && bus + bridgeDrop < least) {
+            least = bus + bridgeDrop;
             ending = Ending.EMPTY;
         }
-        if (resistance * Math.abs(current) < least) {
-            least = resistance * Math.abs(current);
+        if (resistance * current < least) {
+            least = resistance * current;
             ending = Ending.NO_CURRENT;
         }
-        return resistance * Math.abs(closesAt - current) < least ? Ending.PLUNGER : ending;
+        return resistance * (closesAt - current) < least ? Ending.PLUNGER : ending;
     }
 
     /** Ways in which the piece can end before its time. */

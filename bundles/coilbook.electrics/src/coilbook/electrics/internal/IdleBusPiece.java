@@ -63,7 +63,7 @@ final class IdleBusPiece extends Piece {
 
     /** True if the coil, not the rectifier, ended the piece. */
     boolean woke() {
-        return Math.abs(wakesAt - bus) <= Math.abs(margin());
+        return wakesAt - bus <= margin();
     }
 
     @Override
