@@ -19,7 +19,7 @@ class LineCapacitorReferenceTest {
 
     @ParameterizedTest
     @CsvSource({ "b1_120V60Hz_ph90,120,60,90", "b2_120V60Hz_ph0,120,60,0", "b3_100V50Hz_ph90,100,50,90", "b4_100V50Hz_ph0,100,50,0",
-        "b5_132V60Hz_ph90,132,60,90", "b6_132V60Hz_ph0,132,60,0", "b7_108V60Hz_ph90,108,60,90", "b13_230V50Hz_misfit,230,50,90" })
+            "b5_132V60Hz_ph90,132,60,90", "b6_132V60Hz_ph0,132,60,0", "b7_108V60Hz_ph90,108,60,90", "b13_230V50Hz_misfit,230,50,90" })
     void firstCycle(String name, double voltage, double frequency, double phase) throws IllegalCaseException {
         CircuitCase circuit = Cases.lineA(voltage, frequency, phase, 0.3, 2.5, 1);
         CycleResult cycle = Cases.first(circuit);

@@ -65,8 +65,8 @@ class RegulatedReferenceTest {
 
     @ParameterizedTest
     @CsvSource({ "d1_B_hold_diode,10,8e-3,0.6,0.7,0.5e-3,1e-3", "d2_B_hold_zener47,10,8e-3,0.6,47,20e-6,50e-6",
-        "d3_B_peak_diode,10,8e-3,4.8,0.7,0.5e-3,1e-3", "d4_B_peak_zener47,10,8e-3,4.8,47,0.1e-3,0.3e-3",
-        "d5_A_hold_diode,250,0.2,0.16,0.7,0.5e-3,1e-3", "d6_A_hold_zener200,250,0.2,0.16,200,50e-6,0.1e-3" })
+            "d3_B_peak_diode,10,8e-3,4.8,0.7,0.5e-3,1e-3", "d4_B_peak_zener47,10,8e-3,4.8,47,0.1e-3,0.3e-3",
+            "d5_A_hold_diode,250,0.2,0.16,0.7,0.5e-3,1e-3", "d6_A_hold_zener200,250,0.2,0.16,200,50e-6,0.1e-3" })
     void releaseIntoAClamp(String name, double resistance, double inductance, double start, double clamp, double first, double second)
             throws IllegalCaseException {
         double onTime = 0.1;
