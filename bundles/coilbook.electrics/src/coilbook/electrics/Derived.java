@@ -7,7 +7,7 @@ import java.util.OptionalDouble;
  * One derived value with what it rests on. Data are named by stable ids: {@code coil.inductance}, {@code duty.rate} and so on, see
  * {@link Data}.
  *
- * @param value SI unit as the field says; NaN if it could not be derived; infinite if there is none, as with a current that is never reached
+ * @param value SI unit as the field says; NaN if it could not be derived, or with nothing missing if it means nothing for this kind; infinite if there is none, as with a current that is never reached
  * @param at the condition it was computed for
  * @param missing data without which there is no value; empty if there is one
  * @param bounded data that were missing and were replaced by their least favourable bound: a limit met is met for certain, a limit missed is not

@@ -39,25 +39,37 @@ public final class SteadySearch {
         if (Machines.phaseStep(circuit) == 0) {
             return search.result(List.of(search.forward(circuit.mains().phase())));
         }
-        return search.overPhases();
+        return search.overPhases(PHASES);
     }
 
-    /** The repeating cycle over all phases of the mains, whether locked or not: what holds whenever the timer may fire. */
-    public static SteadyResult findAtAnyPhase(CircuitCase circuit) throws IllegalCaseException {
+    /** The repeating cycle over a number of evenly spaced phases of the mains, whether locked or not: what holds whenever the timer may fire. */
+    public static SteadyResult overPhases(CircuitCase circuit, int phases) throws IllegalCaseException {
         SteadySearch search = new SteadySearch(circuit);
-        return Machines.feelsMains(circuit) ? search.overPhases() : search.result(List.of(search.forward(0)));
+        return Machines.feelsMains(circuit) ? search.overPhases(phases) : search.result(List.of(search.forward(0)));
+    }
+
+    /** The first cycle after rest, over a number of evenly spaced phases of the mains. */
+    public static SteadyResult fromRest(CircuitCase circuit, int phases) throws IllegalCaseException {
+        SteadySearch search = new SteadySearch(circuit);
+        int count = Machines.feelsMains(circuit) ? phases : 1;
+        List<CycleResult> byPhase = new ArrayList<>(count);
+        for (int index = 0; index < count; index++) {
+            byPhase.add(search.after(0, Math.PI * index / count, 0));
+        }
+        search.slowest = 1;
+        return search.result(byPhase);
     }
 
     private SteadyResult result(List<CycleResult> byPhase) {
         return new SteadyResult(worst(byPhase, slowest), byPhase, slowest, settled);
     }
 
-    private SteadyResult overPhases() throws IllegalCaseException {
-        List<CycleResult> byPhase = new ArrayList<>(PHASES);
+    private SteadyResult overPhases(int phases) throws IllegalCaseException {
+        List<CycleResult> byPhase = new ArrayList<>(phases);
         double step = Machines.phaseStep(circuit);
         int lead = 1;
-        for (int index = 0; index < PHASES; index++) {
-            double phase = Math.PI * index / PHASES;
+        for (int index = 0; index < phases; index++) {
+            double phase = Math.PI * index / phases;
             CycleResult last = after(lead, phase, step);
             CycleResult next = after(lead + 1, phase, step);
             while (!agree(last, next) && lead < MOST_CYCLES) {
@@ -127,13 +139,19 @@ public final class SteadySearch {
                     Math.min(worst.holdMinimumCurrent(), next.holdMinimumCurrent()),
                     Math.min(worst.holdRmsCurrent(), next.holdRmsCurrent()),
                     Math.min(worst.minimumAfterPeakCurrent(), next.minimumAfterPeakCurrent()),
-                    Math.min(worst.minimumAfterOpeningCurrent(), next.minimumAfterOpeningCurrent()),
-                    Math.max(worst.belowDropOut(), next.belowDropOut()), Math.min(worst.currentAtSwitchOff(), next.currentAtSwitchOff()),
+                    leastKnown(worst.minimumAfterOpeningCurrent(), next.minimumAfterOpeningCurrent()),
+                    -leastKnown(-worst.belowDropOut(), -next.belowDropOut()),
+                    Math.min(worst.currentAtSwitchOff(), next.currentAtSwitchOff()),
                     Math.max(worst.releaseTime(), next.releaseTime()), Math.max(worst.residualCurrent(), next.residualCurrent()),
                     Math.max(worst.windingEnergy(), next.windingEnergy()), Math.max(worst.coilRmsCurrent(), next.coilRmsCurrent()),
                     Math.max(worst.mainsRmsCurrent(), next.mainsRmsCurrent()), Math.max(worst.mainsPeakCurrent(), next.mainsPeakCurrent()),
                     energies);
         }
         return worst;
+    }
+
+    /** The hold of a phase whose on-time ends before the valve is open does not count. */
+    private static double leastKnown(double one, double other) {
+        return Double.isNaN(one) ? other : Double.isNaN(other) ? one : Math.min(one, other);
     }
 }
