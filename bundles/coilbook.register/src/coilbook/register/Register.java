@@ -63,6 +63,11 @@ public interface Register extends AutoCloseable {
     /** The status rows of today. They may be behind: {@link Status#bringUpToDate} first. */
     Status status() throws CoilbookException;
 
+    /**
+     * The status rows of a past, of part of the fleet, computed and judged now; for reading like those of today. To be closed after use.
+     */
+    PastStatus statusAsOf(AsOf asOf, FleetScope scope, Progress progress) throws CoilbookException;
+
     @Override
     void close() throws CoilbookException;
 }
