@@ -4,8 +4,10 @@ import java.util.ArrayList;
 import java.util.List;
 
 import coilbook.criteria.internal.Derivation;
+import coilbook.criteria.internal.ElectricCriterion;
 import coilbook.criteria.internal.records.Concessions;
 import coilbook.criteria.internal.records.Recheck;
+import coilbook.criteria.internal.station.StationData;
 import coilbook.electrics.StationElectrics;
 import coilbook.fleet.StationView;
 
@@ -36,10 +38,13 @@ public final class Assessor {
     }
 
     public Assessment assess(StationView view) {
-        StationElectrics electrics = derivation.apply(StationCircuits.of(view));
+        StationData data = new StationData(view);
+        StationElectrics electrics = derivation.apply(data.circuit());
         List<Finding> findings = new ArrayList<>(criteria.size());
         for (Criterion criterion : criteria) {
-            findings.add(Concessions.apply(criterion.judge(view, electrics), view));
+            Finding finding = criterion instanceof ElectricCriterion electric ? electric.judge(view, electrics, data)
+                    : criterion.judge(view, electrics);
+            findings.add(Concessions.apply(finding, view));
         }
         return new Assessment(view, electrics, findings, Recheck.on(view));
     }

@@ -3,6 +3,7 @@ package coilbook.criteria.internal;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.function.DoublePredicate;
 import java.util.function.Function;
 
 import coilbook.criteria.Finding;
@@ -35,10 +36,21 @@ public abstract class ElectricCriterion extends DescribedCriterion {
         return judge(station, electrics, new StationData(station));
     }
 
-    protected abstract Finding judge(StationView station, StationElectrics electrics, StationData data);
+    /** The same with the station's data already looked up. */
+    public abstract Finding judge(StationView station, StationElectrics electrics, StationData data);
 
-    protected final StationElectrics derive(StationCircuit circuit) {
-        return derivation.apply(circuit);
+    /**
+     * Whether a limit that is missed in the warmest surroundings a coil can have is missed in the coolest too. False where the surroundings are known, or where
+     * the value is bounded for other reasons: the first answer then stands.
+     *
+     * @param value taken from the electrics in the coolest surroundings
+     */
+    protected final boolean missedEvenInTheCoolest(StationData data, Function<StationElectrics, Derived> value, DoublePredicate missed) {
+        if (data.ambient().highest().narrowing().isEmpty()) {
+            return false;
+        }
+        Derived cooler = value.apply(derivation.apply(data.coolestCircuit()));
+        return cooler.known() && cooler.bounded().isEmpty() && missed.test(cooler.value());
     }
 
     /** What keeps a limit that is missed from being missed for certain: data bounded on the unfavourable side. */

@@ -37,7 +37,7 @@ public final class Shown {
     }
 
     private static String plain(double shown, int digits) {
-        BigDecimal rounded = new BigDecimal(shown).round(new MathContext(digits));
+        BigDecimal rounded = BigDecimal.valueOf(shown).round(new MathContext(digits));
         return (rounded.signum() == 0 ? BigDecimal.ZERO : rounded.stripTrailingZeros()).toPlainString().replace('-', '−');
     }
 }

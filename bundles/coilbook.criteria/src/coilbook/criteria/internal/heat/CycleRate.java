@@ -19,6 +19,7 @@ import coilbook.electrics.Data;
 import coilbook.electrics.Derived;
 import coilbook.electrics.StationCircuit;
 import coilbook.electrics.StationElectrics;
+import coilbook.fleet.Provenance;
 import coilbook.fleet.StationView;
 import coilbook.fleet.Unit;
 
@@ -41,7 +42,7 @@ public final class CycleRate extends ElectricCriterion {
     }
 
     @Override
-    protected Finding judge(StationView station, StationElectrics electrics, StationData data) {
+    public Finding judge(StationView station, StationElectrics electrics, StationData data) {
         CycleRateLimit limits = electrics.cycleRate();
         Fact mean = data.duty().meanRate();
         Fact burst = data.duty().burstRate();
@@ -92,18 +93,17 @@ public final class CycleRate extends ElectricCriterion {
         if (worst.ruling() != CycleRateLimit.Ruling.WINDING_TEMPERATURE) {
             return data.bounded(worst.limit());
         }
-        List<String> bounds = new ArrayList<>(data.ambient().highest().narrowing());
-        if (!bounds.isEmpty() && data.bounded(worst.limit()).isEmpty() && data.cable().isKnown()) {
-            Derived cooler = derive(data.coolestCircuit()).cycleRate().windingTemperature();
-            if (cooler.known() && !Compare.atMost(worst.rate().value(), cooler.value())) {
-                return List.of();
-            }
+        double rate = worst.rate().value();
+        if (data.cable().isKnown()
+                && missedEvenInTheCoolest(data, e -> e.cycleRate().windingTemperature(), highest -> !Compare.atMost(rate, highest))) {
+            return List.of();
         }
+        List<String> bounds = new ArrayList<>(data.ambient().highest().narrowing());
         bounds.addAll(data.cable().missing());
         return unfavourable(data, worst.limit(), bounds);
     }
 
-    private static coilbook.fleet.Provenance provenance(StationData data, CycleRateLimit.Ruling ruling) {
+    private static Provenance provenance(StationData data, CycleRateLimit.Ruling ruling) {
         return switch (ruling) {
             case WINDING_TEMPERATURE -> data.weakest(Data.THERMAL_RESISTANCE, Data.AMBIENT);
             case SOURCE_RECOVERY -> data.weakest(Data.PULL_IN_CURRENT);

@@ -41,7 +41,7 @@ public final class WindingTemperature extends ElectricCriterion {
     }
 
     @Override
-    protected Finding judge(StationView station, StationElectrics electrics, StationData data) {
+    public Finding judge(StationView station, StationElectrics electrics, StationData data) {
         Derived winding = electrics.windingTemperature();
         Fact classLimit = data.fact(Data.INSULATION_CLASS);
         Judgement judgement = judgement().at("hot").hazard(true).restsOn(data.weakestOfCurrent())
@@ -68,7 +68,8 @@ public final class WindingTemperature extends ElectricCriterion {
                 + Shown.of(allowance, Unit.KELVIN) + " for the hot spot";
         double margin = station.fleetSettings().get(FleetSettings.TEMPERATURE_MARGIN);
         Verdict verdict = Compare.temperature(winding.value(), limit, margin);
-        boolean decided = verdict == Verdict.NONCONFORMITY && certainlyTooHot(data, winding, limit);
+        boolean decided = verdict == Verdict.NONCONFORMITY && data.cable().isKnown()
+                && missedEvenInTheCoolest(data, StationElectrics::windingTemperature, celsius -> !Compare.atMost(celsius, limit));
         List<String> open = decided ? List.of() : unfavourable(data, winding, bounds(data));
         return conclude(judgement, verdict, sentence(electrics, data, winding) + allowed, List.of(), open);
     }
@@ -77,15 +78,6 @@ public final class WindingTemperature extends ElectricCriterion {
         List<String> names = new ArrayList<>(data.ambient().highest().narrowing());
         names.addAll(data.cable().missing());
         return names;
-    }
-
-    /** Too hot even in the coolest surroundings the coil can have. */
-    private boolean certainlyTooHot(StationData data, Derived winding, double limit) {
-        if (!data.bounded(winding).isEmpty() || !data.cable().isKnown() || data.ambient().highest().narrowing().isEmpty()) {
-            return false;
-        }
-        Derived cooler = derive(data.coolestCircuit()).windingTemperature();
-        return cooler.known() && !Compare.atMost(cooler.value(), limit);
     }
 
     private static String sentence(StationElectrics electrics, StationData data, Derived winding) {

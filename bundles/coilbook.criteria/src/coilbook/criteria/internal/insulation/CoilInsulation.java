@@ -61,9 +61,9 @@ public final class CoilInsulation extends DescribedCriterion {
 
     private Finding judge(StationView station, WorkingVoltage working) {
         CoilType coil = station.coil();
-        Fact rmsRating = Fact.of(coil.insulationVoltage(), Names.ofCoil("Insulation voltage", station));
+        Fact rmsRating = Fact.of(coil.insulationVoltage(), () -> Names.ofCoil("Insulation voltage", station));
         Fact peakRating = coil.insulationPeakVoltage() == null ? rmsRating.map(v -> v * Math.sqrt(2))
-                : Fact.of(coil.insulationPeakVoltage(), "");
+                : Fact.of(coil.insulationPeakVoltage(), () -> "");
         Judgement judgement = judgement().at("high").restsOn(Fact.weakest(working.rms(), working.peak(), rmsRating, peakRating))
                 .number("Working voltage, rms", working.rms().value(), Unit.VOLT).number("Insulation voltage", rmsRating.value(), Unit.VOLT)
                 .number("Working voltage, peak", working.peak().value(), Unit.VOLT)

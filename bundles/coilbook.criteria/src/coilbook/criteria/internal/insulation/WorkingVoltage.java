@@ -37,9 +37,9 @@ public record WorkingVoltage(Fact rms, Fact peak, Fact customarySum, boolean mai
     public static WorkingVoltage isolatedOutput(StationView view) {
         DriverType driver = view.driver();
         Fact output = switch (driver.kind()) {
-            case TWO_LEVEL -> Fact.of(driver.pullInVoltage(), Names.ofDriver("Pull-in voltage", view));
-            case CURRENT_REGULATED -> Fact.of(driver.busVoltage(), Names.ofDriver("Bus voltage", view));
-            case FIXED_DC -> Fact.of(driver.outputVoltage(), Names.ofDriver("Output voltage", view));
+            case TWO_LEVEL -> Fact.of(driver.pullInVoltage(), () -> Names.ofDriver("Pull-in voltage", view));
+            case CURRENT_REGULATED -> Fact.of(driver.busVoltage(), () -> Names.ofDriver("Bus voltage", view));
+            case FIXED_DC -> Fact.of(driver.outputVoltage(), () -> Names.ofDriver("Output voltage", view));
             default -> throw new IllegalArgumentException(driver.kind() + " is never isolated");
         };
         return new WorkingVoltage(output, output.with(clamp(view), Double::sum), Fact.missing("Mains"), false);
@@ -49,6 +49,6 @@ public record WorkingVoltage(Fact rms, Fact peak, Fact customarySum, boolean mai
         if (view.driver().kind() == DriverKind.DIRECT_AC) {
             return Fact.known(0, null);
         }
-        return Fact.of(view.driver().clampVoltage(), Names.ofDriver("Clamp voltage", view));
+        return Fact.of(view.driver().clampVoltage(), () -> Names.ofDriver("Clamp voltage", view));
     }
 }

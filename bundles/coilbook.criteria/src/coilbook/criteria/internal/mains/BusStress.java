@@ -57,15 +57,15 @@ public final class BusStress extends DescribedCriterion {
         if (driver.kind() == DriverKind.LINE_CAPACITOR) {
             parts.add(part(station, "capacitor", driver.capacitorRating(), "Capacitor voltage rating", high, NO_DROP));
         }
-        Fact clamp = Fact.of(driver.clampVoltage(), Names.ofDriver("Clamp voltage", station));
+        Fact clamp = Fact.of(driver.clampVoltage(), () -> Names.ofDriver("Clamp voltage", station));
         parts.add(part(station, "switch", driver.switchRating(), "Switch voltage rating", high, clamp));
         return judge(parts, high);
     }
 
     /** The rectifier drop only ever helps, the clamp only ever adds: without the one the stress has an upper bound, without the other a lower one. */
     private static Part part(StationView station, String name, Datum rating, String heading, Fact high, Fact added) {
-        Fact limit = Fact.of(rating, Names.ofDriver(heading, station));
-        Fact drop = Fact.of(station.driver().rectifierDrop(), Names.ofDriver("Rectifier drop", station));
+        Fact limit = Fact.of(rating, () -> Names.ofDriver(heading, station));
+        Fact drop = Fact.of(station.driver().rectifierDrop(), () -> Names.ofDriver("Rectifier drop", station));
         Fact peak = high.map(v -> v * Math.sqrt(2));
         Fact most = peak.with(drop.isKnown() ? drop : NO_DROP, (p, d) -> p - d).with(added, Double::sum);
         Fact least = peak.with(drop, (p, d) -> p - d).with(added.isKnown() ? added : NO_DROP, Double::sum);

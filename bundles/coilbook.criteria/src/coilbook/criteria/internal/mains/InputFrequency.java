@@ -30,8 +30,8 @@ public final class InputFrequency extends SettingCriterion {
 
     @Override
     Finding judge(StationView station, InputVoltage input, InputSetting setting, ChosenSetting chosen) {
-        Fact lowest = Fact.of(setting.lowestFrequency(), of("Lowest frequency", setting));
-        Fact highest = Fact.of(setting.highestFrequency(), of("Highest frequency", setting));
+        Fact lowest = Fact.of(setting.lowestFrequency(), () -> of("Lowest frequency", setting));
+        Fact highest = Fact.of(setting.highestFrequency(), () -> of("Highest frequency", setting));
         Judgement judgement = judgement().restsOn(Fact.weakest(input.frequency(), lowest, highest)).restsOn(chosen.provenance())
                 .number("Nominal frequency", input.frequency().value(), Unit.HERTZ).number("Lowest frequency", lowest.value(), Unit.HERTZ)
                 .number("Highest frequency", highest.value(), Unit.HERTZ);

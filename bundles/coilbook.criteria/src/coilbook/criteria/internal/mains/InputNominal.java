@@ -31,8 +31,8 @@ public final class InputNominal extends SettingCriterion {
 
     @Override
     Finding judge(StationView station, InputVoltage input, InputSetting setting, ChosenSetting chosen) {
-        Fact lowest = Fact.of(setting.lowestVoltage(), of("Lowest voltage", setting));
-        Fact highest = Fact.of(setting.highestVoltage(), of("Highest voltage", setting));
+        Fact lowest = Fact.of(setting.lowestVoltage(), () -> of("Lowest voltage", setting));
+        Fact highest = Fact.of(setting.highestVoltage(), () -> of("Highest voltage", setting));
         Fact nominal = input.nominal();
         Judgement judgement = judgement().at("nominal").restsOn(Fact.weakest(nominal, lowest, highest)).restsOn(chosen.provenance())
                 .number("Nominal voltage", nominal.value(), Unit.VOLT).number("Lowest voltage", lowest.value(), Unit.VOLT)

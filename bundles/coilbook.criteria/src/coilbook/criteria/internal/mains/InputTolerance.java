@@ -37,8 +37,8 @@ public final class InputTolerance extends SettingCriterion {
 
     @Override
     Finding judge(StationView station, InputVoltage input, InputSetting setting, ChosenSetting chosen) {
-        Fact lowest = Fact.of(setting.lowestVoltage(), of("Lowest voltage", setting));
-        Fact highest = Fact.of(setting.highestVoltage(), of("Highest voltage", setting));
+        Fact lowest = Fact.of(setting.lowestVoltage(), () -> of("Lowest voltage", setting));
+        Fact highest = Fact.of(setting.highestVoltage(), () -> of("Highest voltage", setting));
         Fact low = input.low();
         Fact high = input.high();
         Judgement judgement = judgement().restsOn(Fact.weakest(low, high, lowest, highest)).restsOn(chosen.provenance())

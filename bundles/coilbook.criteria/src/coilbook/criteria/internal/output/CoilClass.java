@@ -54,9 +54,9 @@ public final class CoilClass extends DescribedCriterion {
         }
         CoilType coil = station.coil();
         DriverType driver = station.driver();
-        Fact rated = Fact.of(coil.ratedVoltage(), Names.ofCoil("Rated voltage", station));
-        Fact from = Fact.of(driver.coilVoltageFrom(), Names.ofDriver("Coils rated voltage from", station));
-        Fact to = Fact.of(driver.coilVoltageTo(), Names.ofDriver("Coils rated voltage to", station));
+        Fact rated = Fact.of(coil.ratedVoltage(), () -> Names.ofCoil("Rated voltage", station));
+        Fact from = Fact.of(driver.coilVoltageFrom(), () -> Names.ofDriver("Coils rated voltage from", station));
+        Fact to = Fact.of(driver.coilVoltageTo(), () -> Names.ofDriver("Coils rated voltage to", station));
         Judgement judgement = judgement().restsOn(Fact.weakest(rated, from, to)).number("Rated voltage", rated.value(), Unit.VOLT)
                 .number("Coils rated voltage from", from.value(), Unit.VOLT).number("Coils rated voltage to", to.value(), Unit.VOLT);
         if (driver.coilKind() == null && driver.kind() != null) {
@@ -81,7 +81,7 @@ public final class CoilClass extends DescribedCriterion {
                             Unit.VOLT)
                     .is(Verdict.CONFORMITY, "Coil type " + coil.code() + " is rated " + coil.ratedKind().label() + " "
                             + Shown.of(rated.value(), Unit.VOLT) + "; " + output(driver));
-        } else if (coil.approvedDrivers().contains(driver.code())) {
+        } else if (coil.approvedDrivers() != null && coil.approvedDrivers().contains(driver.code())) {
             return judgement.is(Verdict.CONFORMITY,
                     "The maker of coil type " + coil.code() + " approves driver type " + driver.code() + " (catalogue)");
         }

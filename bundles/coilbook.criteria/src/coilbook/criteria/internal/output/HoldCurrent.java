@@ -50,7 +50,7 @@ public final class HoldCurrent extends ElectricCriterion {
     }
 
     @Override
-    protected Finding judge(StationView station, StationElectrics electrics, StationData data) {
+    public Finding judge(StationView station, StationElectrics electrics, StationData data) {
         Derived least = electrics.holdMinimum();
         Derived mean = electrics.holdMean();
         Fact dropOut = data.fact(Data.DROP_OUT_CURRENT);
@@ -84,15 +84,16 @@ public final class HoldCurrent extends ElectricCriterion {
         boolean lineOperated = station.driver().kind() == DriverKind.LINE_CAPACITOR;
         double margin = station.fleetSettings().get(FleetSettings.MARGIN);
         Fact dropOut = data.fact(Data.DROP_OUT_CURRENT);
-        String limit = "; " + Shown.beside(needed, mean.value(), Unit.AMPERE) + " needed, " + FACTOR.formatted(needed / dropOut.value())
-                + " drop-out "
+        String limit = "; " + Shown.beside(needed, mean.value(), Unit.AMPERE) + " needed, " + Shown.of(needed / dropOut.value(), Unit.NONE)
+                + " × drop-out "
                 + Shown.of(dropOut.value(), Unit.AMPERE) + source(dropOut.provenance());
         String about = "Hold current " + Shown.of(mean.value(), Unit.AMPERE) + " mean" + under(mean.at(), lineOperated)
                 + data.channel().words();
         Verdict byMean = Compare.floor(mean.value(), needed, margin);
         if (byMean == Verdict.NONCONFORMITY) {
             return conclude(judgement.compared(mean.value(), needed, Unit.AMPERE), byMean, about + limit, List.of(),
-                    certainlyMissed(data, mean, needed) ? List.of() : unfavourable(data, mean, data.ambient().highest().narrowing()));
+                    missedEvenInTheCoolest(data, StationElectrics::holdMean, hold -> !Compare.atLeast(hold, needed)) ? List.of()
+                            : unfavourable(data, mean, data.ambient().highest().narrowing()));
         } else if (!Compare.atLeast(least.value(), dropOut.value())) {
             return dip(station, electrics, data, judgement, about);
         }
@@ -104,22 +105,12 @@ public final class HoldCurrent extends ElectricCriterion {
                 List.of());
     }
 
-    private static final String FACTOR = "%s ×";
-
-    private boolean certainlyMissed(StationData data, Derived mean, double needed) {
-        if (!data.bounded(mean).isEmpty() || data.ambient().highest().narrowing().isEmpty()) {
-            return false;
-        }
-        Derived cooler = derive(data.coolestCircuit()).holdMean();
-        return cooler.known() && !Compare.atLeast(cooler.value(), needed);
-    }
-
     /** A dip below drop-out: bridged where it is shorter than the ride-through time. */
     private static Finding dip(StationView station, StationElectrics electrics, StationData data, Judgement judgement, String about) {
         Derived below = electrics.belowDropOut();
         Derived least = electrics.holdMinimum();
         double dropOut = data.fact(Data.DROP_OUT_CURRENT).value();
-        Fact ride = Fact.of(station.coil().rideThrough(), Names.ofCoil("Ride-through time", station));
+        Fact ride = Fact.of(station.coil().rideThrough(), () -> Names.ofCoil("Ride-through time", station));
         String dips = about + ", but it dips to " + Shown.beside(least.value(), dropOut, Unit.AMPERE) + under(least.at(), false)
                 + ", below drop-out "
                 + Shown.of(dropOut, Unit.AMPERE) + " for " + Shown.of(below.value(), Unit.MILLISECOND);

@@ -43,19 +43,19 @@ public final class OutputCurrent extends ElectricCriterion {
     }
 
     @Override
-    protected Finding judge(StationView station, StationElectrics electrics, StationData data) {
+    public Finding judge(StationView station, StationElectrics electrics, StationData data) {
         DriverType driver = station.driver();
         if (driver == null) {
             return judgement().undetermined(List.of(Names.noType(FittedKind.DRIVER, station)));
         }
         List<Finding> findings = new ArrayList<>();
-        findings.add(current(station, electrics.peakAtHigh(), data, "channel", Fact.of(driver.outputCurrentLimit(),
-                Names.ofDriver("Output current limit", station))));
+        findings.add(current(station, electrics.peakAtHigh(), data, "channel",
+                Fact.of(driver.outputCurrentLimit(), () -> Names.ofDriver("Output current limit", station))));
         if (driver.moduleCurrentLimit() != null) {
-            findings.add(current(station, electrics.peakAtHigh(), data, "module", Fact.of(driver.moduleCurrentLimit(), "")));
+            findings.add(current(station, electrics.peakAtHigh(), data, "module", Fact.of(driver.moduleCurrentLimit(), () -> "")));
         }
         if (driver.lowestLoad() != null) {
-            findings.add(load(station, data, Fact.of(driver.lowestLoad(), "")));
+            findings.add(load(station, data, Fact.of(driver.lowestLoad(), () -> "")));
         }
         Finding worst = findings.get(0);
         for (Finding finding : findings) {

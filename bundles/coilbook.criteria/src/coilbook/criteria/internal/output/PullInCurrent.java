@@ -46,7 +46,7 @@ public final class PullInCurrent extends ElectricCriterion {
     }
 
     @Override
-    protected Finding judge(StationView station, StationElectrics electrics, StationData data) {
+    public Finding judge(StationView station, StationElectrics electrics, StationData data) {
         Derived peak = electrics.peakAtLow();
         Fact pullIn = data.fact(Data.PULL_IN_CURRENT);
         Judgement judgement = judgement().at(corner(peak.at())).restsOn(data.weakestOfCurrent())
@@ -73,22 +73,17 @@ public final class PullInCurrent extends ElectricCriterion {
     }
 
     private Finding missed(StationElectrics electrics, StationData data, Fact pullIn, Judgement judgement, String sentence) {
-        List<String> open = unfavourable(data, electrics.peakAtLow(), data.ambient().highest().narrowing());
-        if (!open.isEmpty() && data.bounded(electrics.peakAtLow()).isEmpty()) {
-            Derived cooler = derive(data.coolestCircuit()).peakAtLow();
-            if (cooler.known() && !Compare.atLeast(cooler.value(), pullIn.value())) {
-                open = List.of();
-            }
-        }
+        boolean certain = missedEvenInTheCoolest(data, StationElectrics::peakAtLow, peak -> !Compare.atLeast(peak, pullIn.value()));
+        List<String> open = certain ? List.of() : unfavourable(data, electrics.peakAtLow(), data.ambient().highest().narrowing());
         return conclude(judgement, Verdict.NONCONFORMITY, sentence, List.of(), open);
     }
 
     /** Reached; it must stay there for the valve's opening delay. */
-    private static Finding opening(StationView station, StationElectrics electrics, StationData data, Judgement judgement, Verdict verdict,
+    private Finding opening(StationView station, StationElectrics electrics, StationData data, Judgement judgement, Verdict verdict,
             String sentence) {
         Datum delay = station.valve() == null ? null : station.valve().openingDelay();
         Fact opening = Fact.of(delay,
-                station.valve() == null ? Names.noType(FittedKind.VALVE, station) : Names.ofValve("Opening delay", station));
+                () -> station.valve() == null ? Names.noType(FittedKind.VALVE, station) : Names.ofValve("Opening delay", station));
         Derived held = electrics.heldAtPullIn();
         List<String> missing = new ArrayList<>(opening.missing());
         missing.addAll(data.missing(held));
@@ -101,9 +96,10 @@ public final class PullInCurrent extends ElectricCriterion {
         String needed = Shown.beside(opening.value(), held.value(), Unit.MILLISECOND) + " to open" + source(opening.provenance());
         if (!Compare.atLeast(held.value(), opening.value())) {
             judgement.compared(held.value(), opening.value(), Unit.MILLISECOND);
+            boolean certain = missedEvenInTheCoolest(data, StationElectrics::heldAtPullIn, time -> !Compare.atLeast(time, opening.value()));
             return conclude(judgement, Verdict.NONCONFORMITY, sentence + "; it stays there only " + stays + ", the valve needs " + needed,
                     List.of(),
-                    unfavourable(data, held, data.ambient().highest().narrowing()));
+                    certain ? List.of() : unfavourable(data, held, data.ambient().highest().narrowing()));
         }
         return conclude(judgement, verdict, sentence + "; it stays there " + stays + ", the valve needs " + needed, data.cable().missing(),
                 List.of());

@@ -16,12 +16,12 @@ public final class CableResistance {
     }
 
     public static Fact of(StationView view) {
-        Fact length = Fact.of(view.station().cableLength(), Names.ofStation("Cable length", view));
+        Fact length = Fact.of(view.station().cableLength(), () -> Names.ofStation("Cable length", view));
         if (length.isKnown() && length.value() == 0) {
             return length;
         }
         Fact perMetre = view.cable() == null ? Fact.missing(Names.noType(FittedKind.CABLE, view))
-                : Fact.of(view.cable().conductorResistance(), "Conductor resistance of cable type " + view.cable().code());
+                : Fact.of(view.cable().conductorResistance(), () -> "Conductor resistance of cable type " + view.cable().code());
         Fact loop = length.with(perMetre, (l, r) -> 2 * l * r);
         Datum own = view.station().cableTemperature();
         Datum temperature = own != null || view.site() == null ? own : view.site().ambientHighest();

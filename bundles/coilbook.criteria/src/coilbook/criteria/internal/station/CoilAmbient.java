@@ -9,7 +9,6 @@ import coilbook.fleet.ReadingQuantity;
 import coilbook.fleet.Site;
 import coilbook.fleet.Station;
 import coilbook.fleet.StationView;
-import coilbook.fleet.SubjectKind;
 
 /**
  * The temperature a coil would have unpowered, in °C: as recorded for the station; else as read on the unpowered coil with the adhesive hot; else, on
@@ -46,10 +45,10 @@ public record CoilAmbient(Span lowest, Span nominal, Span highest) {
     public static CoilAmbient of(StationView view) {
         Station station = view.station();
         Site site = view.site();
-        Fact low = Fact.of(site == null ? null : site.ambientLowest(), Names.ofSite("Ambient lowest", view));
-        Fact mid = Fact.of(site == null ? null : site.ambientNominal(), Names.ofSite("Ambient nominal", view));
-        Fact high = Fact.of(site == null ? null : site.ambientHighest(), Names.ofSite("Ambient highest", view));
-        Datum unpowered = reading(view, ReadingQuantity.COIL_TEMPERATURE);
+        Fact low = Fact.of(site == null ? null : site.ambientLowest(), () -> Names.ofSite("Ambient lowest", view));
+        Fact mid = Fact.of(site == null ? null : site.ambientNominal(), () -> Names.ofSite("Ambient nominal", view));
+        Fact high = Fact.of(site == null ? null : site.ambientHighest(), () -> Names.ofSite("Ambient highest", view));
+        Datum unpowered = Readings.newestOnStation(view, ReadingQuantity.COIL_TEMPERATURE);
         return new CoilAmbient(span(view, station.coilAmbientLowest(), unpowered, low, mid),
                 span(view, station.coilAmbientNominal(), unpowered, mid, mid),
                 span(view, station.coilAmbientHighest(), unpowered, high, mid));
@@ -66,13 +65,13 @@ public record CoilAmbient(Span lowest, Span nominal, Span highest) {
                     : read.noStrongerThan(Provenance.ESTIMATED));
         }
         Datum body = view.station().bodyTemperature() != null ? view.station().bodyTemperature()
-                : reading(view, ReadingQuantity.BODY_TEMPERATURE);
+                : Readings.newestOnStation(view, ReadingQuantity.BODY_TEMPERATURE);
         return body == null ? Span.exactly(air) : onBody(view, air, Fact.known(body.value(), body.provenance()));
     }
 
     private static Span onBody(StationView view, Fact air, Fact body) {
-        Fact toAir = Fact.of(view.station().conductanceToAir(), Names.ofStation("Conductance to air", view));
-        Fact toBody = Fact.of(view.station().conductanceToBody(), Names.ofStation("Conductance to body", view));
+        Fact toAir = Fact.of(view.station().conductanceToAir(), () -> Names.ofStation("Conductance to air", view));
+        Fact toBody = Fact.of(view.station().conductanceToBody(), () -> Names.ofStation("Conductance to body", view));
         if (toAir.isKnown() && toBody.isKnown() || !air.isKnown()) {
             Fact heat = air.with(toAir, (t, g) -> t * g).with(body.with(toBody, (t, g) -> t * g), Double::sum);
             return Span.exactly(heat.with(toAir.with(toBody, Double::sum), (sum, conductance) -> sum / conductance));
@@ -81,12 +80,5 @@ public record CoilAmbient(Span lowest, Span nominal, Span highest) {
         Fact cooler = air.with(body, Math::min);
         Fact warmer = air.with(body, Math::max);
         return new Span(cooler, warmer, narrowing);
-    }
-
-    private static Datum reading(StationView view, ReadingQuantity quantity) {
-        return view.readings().stream()
-                .filter(r -> r.quantity() == quantity && r.subjectKind() == SubjectKind.STATION && r.subject().equals(view.code())
-                        && !r.takenAt().toLocalDate().isAfter(view.asOf()))
-                .max(java.util.Comparator.comparing(r -> r.takenAt())).map(r -> Datum.measured(r.value())).orElse(null);
     }
 }

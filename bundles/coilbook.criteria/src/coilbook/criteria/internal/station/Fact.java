@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Set;
 import java.util.function.DoubleBinaryOperator;
 import java.util.function.DoubleUnaryOperator;
+import java.util.function.Supplier;
 
 import coilbook.fleet.Datum;
 import coilbook.fleet.Provenance;
@@ -23,9 +24,9 @@ public record Fact(double value, Provenance provenance, List<String> missing) {
         missing = List.copyOf(missing);
     }
 
-    /** A recorded value, or its name as missing. */
-    public static Fact of(Datum datum, String name) {
-        return datum == null ? missing(name) : new Fact(datum.value(), datum.provenance(), List.of());
+    /** A recorded value, or its name as missing; names are put together only where they are needed, since most values are there. */
+    public static Fact of(Datum datum, Supplier<String> name) {
+        return datum == null ? missing(name.get()) : new Fact(datum.value(), datum.provenance(), List.of());
     }
 
     public static Fact known(double value, Provenance provenance) {

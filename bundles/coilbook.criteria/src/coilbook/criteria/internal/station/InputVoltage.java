@@ -11,7 +11,6 @@ import coilbook.fleet.Provenance;
 import coilbook.fleet.Reading;
 import coilbook.fleet.ReadingQuantity;
 import coilbook.fleet.StationView;
-import coilbook.fleet.SubjectKind;
 import coilbook.fleet.TransformerType;
 import coilbook.fleet.TransformerUse;
 import coilbook.fleet.Unit;
@@ -41,21 +40,21 @@ public record InputVoltage(Fact nominal, Fact low, Fact high, Fact frequency, Li
             Fact none = Fact.missing(Names.ofStation("Circuit", view));
             return new InputVoltage(none, none, none, none, List.of(), "", "");
         }
-        Fact mains = Fact.of(circuit.nominalVoltage(), Names.ofCircuit("Nominal voltage", circuit));
-        Fact frequency = Fact.of(circuit.nominalFrequency(), Names.ofCircuit("Nominal frequency", circuit));
+        Fact mains = Fact.of(circuit.nominalVoltage(), () -> Names.ofCircuit("Nominal voltage", circuit));
+        Fact frequency = Fact.of(circuit.nominalFrequency(), () -> Names.ofCircuit("Nominal frequency", circuit));
         MarketTolerance band = mains.isKnown() && view.market() != null ? view.market().tolerance(mains.value()) : null;
         End low = end(mains, circuit.toleranceBelow(), -1, band == null ? null : band.lowest(),
-                Names.ofCircuit("Tolerance below", circuit));
+                "Tolerance below", circuit);
         End high = end(mains, circuit.toleranceAbove(), 1, band == null ? null : band.highest(),
-                Names.ofCircuit("Tolerance above", circuit));
-        for (Reading reading : readings(view, SubjectKind.CIRCUIT, circuit.key(), ReadingQuantity.MAINS_VOLTAGE)) {
+                "Tolerance above", circuit);
+        for (Reading reading : Readings.onCircuit(view, ReadingQuantity.MAINS_VOLTAGE)) {
             low = low.lower(reading);
             high = high.higher(reading);
         }
         Transformer transformer = Transformer.of(view);
         low = new End(transformer.lowest(low.volts()), low.basis() + transformer.words());
         high = new End(transformer.highest(high.volts()), high.basis() + transformer.words());
-        for (Reading reading : readings(view, SubjectKind.STATION, view.code(), ReadingQuantity.MAINS_VOLTAGE)) {
+        for (Reading reading : Readings.onStation(view, ReadingQuantity.MAINS_VOLTAGE)) {
             low = low.lower(reading);
             high = high.higher(reading);
         }
@@ -63,19 +62,12 @@ public record InputVoltage(Fact nominal, Fact low, Fact high, Fact frequency, Li
         if (frequency.isKnown()) {
             frequencies.add(frequency.value());
         }
-        readings(view, SubjectKind.CIRCUIT, circuit.key(), ReadingQuantity.MAINS_FREQUENCY).forEach(r -> frequencies.add(r.value()));
-        readings(view, SubjectKind.STATION, view.code(), ReadingQuantity.MAINS_FREQUENCY).forEach(r -> frequencies.add(r.value()));
+        Readings.onCircuit(view, ReadingQuantity.MAINS_FREQUENCY).forEach(r -> frequencies.add(r.value()));
+        Readings.onStation(view, ReadingQuantity.MAINS_FREQUENCY).forEach(r -> frequencies.add(r.value()));
         return new InputVoltage(transformer.highest(mains), low.volts(), high.volts(), frequency, frequencies, low.basis(), high.basis());
     }
 
-    private static List<Reading> readings(StationView view, SubjectKind kind, String subject, ReadingQuantity quantity) {
-        return view.readings().stream()
-                .filter(r -> r.subjectKind() == kind && r.quantity() == quantity && r.subject().equals(subject)
-                        && !r.takenAt().toLocalDate().isAfter(view.asOf()))
-                .toList();
-    }
-
-    private static End end(Fact mains, Datum own, int sign, Datum market, String name) {
+    private static End end(Fact mains, Datum own, int sign, Datum market, String heading, Circuit circuit) {
         if (own != null) {
             return new End(mains.map(v -> v * (1 + sign * own.value())).noStrongerThan(own.provenance()),
                     "circuit’s tolerance " + (sign < 0 ? "−" : "+") + Shown.of(own.value(), Unit.PERCENT));
@@ -84,7 +76,7 @@ public record InputVoltage(Fact nominal, Fact low, Fact high, Fact frequency, Li
                     "market’s band " + Shown.of(market.value(), Unit.PERCENT) + " of nominal"
                             + (market.provenance() == Provenance.ASSUMED ? ", assumed" : ""));
         }
-        return new End(mains.isKnown() ? Fact.missing(name) : mains, "");
+        return new End(mains.isKnown() ? Fact.missing(Names.ofCircuit(heading, circuit)) : mains, "");
     }
 
     /** One end of the band with what it rests on. */
@@ -116,10 +108,10 @@ public record InputVoltage(Fact nominal, Fact low, Fact high, Fact frequency, Li
                 return new Transformer(none, none, "");
             }
             String of = " of transformer type " + type.code();
-            Fact ratio = Fact.of(type.secondaryVoltage(), "Secondary voltage" + of).with(
-                    Fact.of(type.primaryVoltage(), "Primary voltage" + of),
+            Fact ratio = Fact.of(type.secondaryVoltage(), () -> "Secondary voltage" + of).with(
+                    Fact.of(type.primaryVoltage(), () -> "Primary voltage" + of),
                     (secondary, primary) -> secondary / primary);
-            return new Transformer(ratio, Fact.of(type.regulation(), "Regulation" + of), " through transformer " + type.code());
+            return new Transformer(ratio, Fact.of(type.regulation(), () -> "Regulation" + of), " through transformer " + type.code());
         }
 
         Fact lowest(Fact mains) {

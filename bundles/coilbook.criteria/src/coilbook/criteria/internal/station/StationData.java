@@ -144,8 +144,8 @@ public final class StationData {
                 put(Data.MAINS_HIGHEST_VOLTAGE, input.high()), put(Data.MAINS_FREQUENCY, input.frequency()));
         ValveType valve = view.valve();
         Fact noValve = Fact.missing(Names.noType(FittedKind.VALVE, view));
-        Fact highestRate = valve == null ? noValve : Fact.of(valve.highestRate(), Names.ofValve("Highest cycle rate", view));
-        Fact closingDelay = valve == null ? noValve : Fact.of(valve.closingDelay(), Names.ofValve("Closing delay", view));
+        Fact highestRate = valve == null ? noValve : Fact.of(valve.highestRate(), () -> Names.ofValve("Highest cycle rate", view));
+        Fact closingDelay = valve == null ? noValve : Fact.of(valve.closingDelay(), () -> Names.ofValve("Closing delay", view));
         facts.put(Data.AMBIENT, highestAmbient);
         return new StationCircuit(supply, driver(), coil(), cable.isKnown() ? cable.value() : 0, ambient.lowest().from().value(),
                 ambient.nominal().isExact() ? ambient.nominal().from().value() : ambient.nominal().to().value(), highestAmbient.value(),
@@ -161,7 +161,7 @@ public final class StationData {
 
     private double driver(String id, Datum datum, String heading) {
         return put(id, view.driver() == null ? Fact.missing(Names.noType(FittedKind.DRIVER, view))
-                : Fact.of(datum, Names.ofDriver(heading, view)));
+                : Fact.of(datum, () -> Names.ofDriver(heading, view)));
     }
 
     private DriverFigures driver() {
@@ -199,7 +199,7 @@ public final class StationData {
     }
 
     private Fact coil(Datum datum, String heading) {
-        return view.coil() == null ? Fact.missing(Names.noType(FittedKind.COIL, view)) : Fact.of(datum, Names.ofCoil(heading, view));
+        return view.coil() == null ? Fact.missing(Names.noType(FittedKind.COIL, view)) : Fact.of(datum, () -> Names.ofCoil(heading, view));
     }
 
     private CoilFigures coil() {

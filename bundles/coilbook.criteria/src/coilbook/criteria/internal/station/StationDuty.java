@@ -5,7 +5,6 @@ import coilbook.fleet.Datum;
 import coilbook.fleet.Duty;
 import coilbook.fleet.ReadingQuantity;
 import coilbook.fleet.StationView;
-import coilbook.fleet.SubjectKind;
 import coilbook.fleet.Unit;
 
 /**
@@ -23,16 +22,16 @@ public record StationDuty(Fact meanRate, Fact burstRate, Fact onTime, Fact offTi
 
     public static StationDuty of(StationView view) {
         Duty duty = view.duty();
-        Fact rate = recorded(view, duty == null ? null : duty.cycleRate(), ReadingQuantity.CYCLE_RATE, Names.ofStation("Cycle rate", view));
-        Fact onTime = recorded(view, duty == null ? null : duty.onTime(), ReadingQuantity.ON_TIME, Names.ofStation("On-time", view));
-        Fact burst = Fact.of(duty == null ? null : duty.burstRate(), Names.ofStation("Burst rate", view));
+        Fact rate = recorded(view, duty == null ? null : duty.cycleRate(), ReadingQuantity.CYCLE_RATE, "Cycle rate");
+        Fact onTime = recorded(view, duty == null ? null : duty.onTime(), ReadingQuantity.ON_TIME, "On-time");
+        Fact burst = Fact.of(duty == null ? null : duty.burstRate(), () -> Names.ofStation("Burst rate", view));
         Fact gapTime = Fact.missing(Names.ofStation("Gap", view));
         if (duty != null) {
             Datum lineSpeed = view.line() == null ? null : view.line().speed();
-            Fact speed = Fact.of(duty.speed() != null ? duty.speed() : lineSpeed, "Line speed of line " + view.station().lineKey());
-            Fact length = Fact.of(duty.beadLength(), Names.ofStation("Bead length", view));
-            Fact gap = Fact.of(duty.gap(), Names.ofStation("Gap", view));
-            Fact pitch = Fact.of(duty.pitch(), Names.ofStation("Pitch", view));
+            Fact speed = Fact.of(duty.speed() != null ? duty.speed() : lineSpeed, () -> "Line speed of line " + view.station().lineKey());
+            Fact length = Fact.of(duty.beadLength(), () -> Names.ofStation("Bead length", view));
+            Fact gap = Fact.of(duty.gap(), () -> Names.ofStation("Gap", view));
+            Fact pitch = Fact.of(duty.pitch(), () -> Names.ofStation("Pitch", view));
             onTime = onTime.orElse(length.with(speed, (l, v) -> l / v));
             gapTime = gap.with(speed, (g, v) -> g / v);
             burst = burst.orElse(speed.with(length.with(gap, Double::sum), (v, l) -> v / l));
@@ -59,8 +58,7 @@ public record StationDuty(Fact meanRate, Fact burstRate, Fact onTime, Fact offTi
                 : burstRate.value();
     }
 
-    private static Fact recorded(StationView view, Datum duty, ReadingQuantity quantity, String name) {
-        var reading = view.newest(SubjectKind.STATION, view.code(), quantity);
-        return Fact.of(duty != null ? duty : reading == null ? null : Datum.measured(reading.value()), name);
+    private static Fact recorded(StationView view, Datum duty, ReadingQuantity quantity, String heading) {
+        return Fact.of(duty != null ? duty : Readings.newestOnStation(view, quantity), () -> Names.ofStation(heading, view));
     }
 }

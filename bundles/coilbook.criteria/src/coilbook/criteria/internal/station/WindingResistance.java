@@ -34,7 +34,7 @@ public record WindingResistance(Fact resistance20, Fact tolerance, boolean measu
             Fact uncertainty = Double.isNaN(reading.uncertainty()) ? tolerance : Fact.known(reading.uncertainty(), Provenance.MEASURED);
             return new WindingResistance(Fact.known(reading.lowest(), how), uncertainty, true);
         }
-        return new WindingResistance(Fact.of(coil.resistance20(), Names.ofCoil("Resistance at 20 °C", view)), tolerance, false);
+        return new WindingResistance(Fact.of(coil.resistance20(), () -> Names.ofCoil("Resistance at 20 °C", view)), tolerance, false);
     }
 
     /** The type's tolerance as a fraction, else the fleet's habit, assumed. */

@@ -42,7 +42,7 @@ public final class WindingResistanceCriterion extends DescribedCriterion {
             return judgement().notYetRecorded(Names.ofStation("Reading of winding resistance", station),
                     "No winding resistance of this coil has been read yet");
         }
-        Fact nominal = Fact.of(station.coil().resistance20(), Names.ofCoil("Resistance at 20 °C", station));
+        Fact nominal = Fact.of(station.coil().resistance20(), () -> Names.ofCoil("Resistance at 20 °C", station));
         Fact tolerance = WindingResistance.typeTolerance(station);
         if (!nominal.isKnown()) {
             return judgement().undetermined(nominal.missing());
