@@ -23,7 +23,7 @@ public final class ElectricsCache {
 
             @Override
             protected boolean removeEldestEntry(Map.Entry<StationCircuit, StationElectrics> eldest) {
-                return size() > capacity;
+                return super.size() > capacity;
             }
         };
     }

@@ -77,7 +77,7 @@ public final class SteadySearch {
                 lead = 2 * lead;
                 next = after(lead + 1, phase, step);
             }
-            settled &= agree(last, next);
+            settled = agree(last, next) && settled;
             slowest = Math.max(slowest, lead + 1);
             byPhase.add(next);
         }

@@ -9,6 +9,7 @@ import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.function.Function;
 import java.util.stream.Collectors;
 
@@ -41,7 +42,8 @@ public final class TableReader {
     static <R extends Row> List<R> read(String name, BufferedReader reader, Kind<R> kind) throws IOException {
         Map<String, Field> byHeading = kind.fields().stream().collect(Collectors.toMap(Field::headingWithUnit, Function.identity()));
         List<Field> columns = new ArrayList<>();
-        for (String heading : reader.readLine().split(TAB, -1)) {
+        String headings = Objects.requireNonNull(reader.readLine(), () -> name + " is empty");
+        for (String heading : headings.split(TAB, -1)) {
             Field field = byHeading.get(heading);
             if (field == null) {
                 throw new IllegalStateException(name + " has an unknown heading: " + heading);

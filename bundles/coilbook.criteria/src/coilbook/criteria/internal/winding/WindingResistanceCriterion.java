@@ -80,8 +80,9 @@ public final class WindingResistanceCriterion extends DescribedCriterion {
                     List.of(Names.ofStation("Reading of winding resistance no older than the fleet’s interval", station)),
                     corrected + band + "; the reading is out of date");
         }
-        double nearer = reading.lowest() - least < most - reading.highest() ? least : most;
-        return judgement.compared(nearer == least ? reading.lowest() : reading.highest(), nearer, Unit.OHM).is(Verdict.CONFORMITY,
+        boolean nearLeast = reading.lowest() - least < most - reading.highest();
+        return judgement.compared(nearLeast ? reading.lowest() : reading.highest(), nearLeast ? least : most, Unit.OHM).is(
+                Verdict.CONFORMITY,
                 corrected + band);
     }
 }
