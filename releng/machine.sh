@@ -67,12 +67,12 @@ need_virtual_display() { need libgtk-3.so.0=libgtk-3-0 Xvfb=xvfb openbox=openbox
 
 need_judges() { need ngspice=ngspice soffice=libreoffice-calc pdftoppm=poppler-utils; }
 
-# virtual_display: starts a screen of its own with a window manager; ended with the script.
+# virtual_display [WIDTHxHEIGHT]: starts a screen of its own with a window manager; ended with the script.
 virtual_display() {
   local folder
   folder=$(mktemp -d)
   mkfifo "$folder/number"
-  Xvfb -displayfd 3 -screen 0 1600x1000x24 -nolisten tcp 3>"$folder/number" >"$folder/log" 2>&1 &
+  Xvfb -displayfd 3 -screen 0 "${1:-1600x1000}x24" -nolisten tcp 3>"$folder/number" >"$folder/log" 2>&1 &
   display_pid=$!
   read -r -t 30 display_number <"$folder/number" || fail "the virtual display did not start: $(cat "$folder/log")"
   export DISPLAY=:$display_number GDK_BACKEND=x11 LIBOVERLAY_SCROLLBAR=0 NO_AT_BRIDGE=1
@@ -129,6 +129,16 @@ stale() {
   [ -e "$product_home/current/built" ] || return 0
   [ -n "$(find "$root/pom.xml" "$root/features" "$root/bundles" "$root/releng/coilbook.platform" "$root/releng/coilbook.product" \
     \( -name target -o -name '*.tests' -o -name bin \) -prune -o \( -type f -o -path '*/src/*' \) -newer "$product_home/current/built" -print 2>/dev/null | head -n 1)" ]
+}
+
+# only NAME,NAME...: the Maven arguments that leave out the product and every test module but those of the named bundles.
+only() {
+  local module name left_out=
+  for module in "$root"/bundles/*.tests "$root"/releng/*.tests; do
+    name=${module##*/coilbook.}
+    [ -d "$module/src" ] && case ,$1, in *,"${name%.tests}",*) false ;; esac && left_out=$left_out,!${module#"$root"/}
+  done
+  echo "-pl !releng/coilbook.product$left_out"
 }
 
 product_home=$root/releng/target/product
