@@ -1,0 +1,35 @@
+package coilbook.exchange.internal.in;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+
+import coilbook.fleet.CoilbookException;
+
+/** What a person says headings mean, where recognition cannot tell: heading to field, or to nothing where the column is to be passed over. */
+final class ColumnMap {
+
+    private final Map<String, String> byHeading = new HashMap<>();
+
+    ColumnMap(Map<String, String> columns, List<Layout> layouts) throws CoilbookException {
+        for (Map.Entry<String, String> entry : columns.entrySet()) {
+            String id = entry.getValue() == null ? "" : entry.getValue().strip();
+            if (!id.isEmpty() && layouts.stream().allMatch(layout -> layout.byId(id) == null)) {
+                throw new CoilbookException(CoilbookException.Reason.BAD_INPUT, "Column map: \"" + entry.getKey() + "\" is to be \"" + id
+                        + "\", which is no field; expected for example station.tag, coil.serial, duty.cycle_rate, reading.winding_resistance, or an empty text");
+            }
+            byHeading.put(Texts.fold(entry.getKey()), id);
+        }
+    }
+
+    /** The field's id, an empty text for a column to pass over, {@code null} where nothing is said. */
+    String get(String heading) {
+        return byHeading.get(Texts.fold(heading));
+    }
+
+    /** The headings said, for headings that no file has. */
+    List<String> headings() {
+        return new ArrayList<>(byHeading.keySet());
+    }
+}
