@@ -5,6 +5,8 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 
+import org.osgi.service.component.annotations.Component;
+
 import coilbook.exchange.FleetFiles;
 import coilbook.exchange.Incoming;
 import coilbook.exchange.internal.ExchangeSheets;
@@ -14,6 +16,7 @@ import coilbook.fleet.Kind;
 import coilbook.fleet.Progress;
 
 /** Reads exchange workbooks and flat lists; keeps nothing between readings. */
+@Component
 public final class FleetFilesReader implements FleetFiles {
 
     private static final int HEADINGS_NAMED = 12;

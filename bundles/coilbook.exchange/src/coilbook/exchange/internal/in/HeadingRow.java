@@ -29,7 +29,8 @@ record HeadingRow(List<MappedColumn> columns, Map<Integer, String> unknown, Map<
         Map<Integer, String> unknown = new LinkedHashMap<>();
         Map<Integer, String> doubled = new LinkedHashMap<>();
         Map<String, MappedColumn> seen = new LinkedHashMap<>();
-        for (int i = 0; i < Math.max(cells.length, above == null ? 0 : above.length); i++) {
+        int width = Math.min(Math.max(cells.length, above == null ? 0 : above.length), InputLimits.HEADING_COLUMNS);
+        for (int i = 0; i < width; i++) {
             String own = text(cells, i);
             String upper = text(above, i);
             if (own.isEmpty() && upper.isEmpty()) {
@@ -53,7 +54,11 @@ record HeadingRow(List<MappedColumn> columns, Map<Integer, String> unknown, Map<
 
     private static String text(Cell[] cells, int index) {
         Cell cell = cells == null || index >= cells.length ? null : cells[index];
-        return cell == null || cell.type() == Cell.Type.ERROR ? "" : Texts.strip(cell.shown());
+        if (cell == null || cell.type() != Cell.Type.TEXT && cell.type() != Cell.Type.NUMBER) {
+            return "";
+        }
+        String text = cell.shown();
+        return text.length() > InputLimits.HEADING_CHARACTERS ? "" : Texts.strip(text);
     }
 
     private static MappedColumn match(Layout layout, ColumnMap map, int index, String text) {

@@ -32,6 +32,11 @@ final class InputLimits {
     /** A heading row is looked for among this many filled rows. */
     static final int HEADING_ROWS = 40;
 
+    /** Headings are looked for in this many columns. */
+    static final int HEADING_COLUMNS = 600;
+    /** A longer text is no heading. */
+    static final int HEADING_CHARACTERS = 200;
+
     private InputLimits() {
     }
 }

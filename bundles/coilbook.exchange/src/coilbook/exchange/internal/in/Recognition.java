@@ -35,6 +35,9 @@ record Recognition(Layout layout, int at, HeadingRow headings, Layout rival) {
         Kind<?> named = ExchangeSheets.bySheet(sheet);
         List<Candidate> best = new ArrayList<>();
         for (int i = 0; i < rows.size(); i++) {
+            if (distinct(rows.get(i).cells()) < LEAST) {
+                continue;
+            }
             for (Layout layout : layouts) {
                 Candidate candidate = candidate(rows, i, layout, map, named, names);
                 if (candidate != null && (best.isEmpty() || candidate.score >= best.get(0).score)) {
