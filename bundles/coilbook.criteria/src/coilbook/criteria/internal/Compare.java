@@ -11,7 +11,8 @@ public final class Compare {
     }
 
     public static boolean atMost(double value, double limit) {
-        return value <= limit + TOLERANCE * Math.max(Math.abs(value), Math.abs(limit));
+        double size = Math.max(Math.abs(value), Math.abs(limit));
+        return value <= limit || Double.isFinite(size) && value - limit <= TOLERANCE * size;
     }
 
     public static boolean atLeast(double value, double limit) {
