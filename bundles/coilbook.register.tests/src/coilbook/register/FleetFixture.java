@@ -57,9 +57,11 @@ final class FleetFixture {
         public Judged judge(StationView station) {
             double ohms = station.coil() == null ? Double.NaN : Datum.orNaN(station.coil().resistance20());
             Verdict verdict = Double.isNaN(ohms) ? Verdict.UNDETERMINED : ohms < 50 ? Verdict.NONCONFORMITY : Verdict.CONFORMITY;
-            Evidence evidence = new Evidence(ohms, 50, coilbook.fleet.Unit.OHM, "", "Coil has " + ohms + " ohm.", null, java.util.Map.of("R", ohms));
+            Evidence evidence = new Evidence(ohms, 50, coilbook.fleet.Unit.OHM, "", "Coil has " + ohms + " ohm.", null,
+                    java.util.Map.of("R", ohms));
             List<Finding> findings = verdict.isReported()
-                    ? List.of(new Finding("coil-resistance", verdict, false, evidence, verdict == Verdict.UNDETERMINED ? List.of("Resistance") : List.of(), false))
+                    ? List.of(new Finding("coil-resistance", verdict, false, evidence,
+                            verdict == Verdict.UNDETERMINED ? List.of("Resistance") : List.of(), false))
                     : List.of();
             Counts counts = new Counts(1, 0, verdict == Verdict.NONCONFORMITY ? 1 : 0, 0, verdict == Verdict.UNDETERMINED ? 1 : 0, 0);
             return new Judged(findings, verdict, counts, java.util.Map.of(StatusColumn.PEAK_CURRENT, 120 / ohms), null);

@@ -48,25 +48,31 @@ class RowRoundTripTest {
     /** One full row of each kind, in the order of the kinds, tied to each other; the tag shows what IEC 81346 tags look like. */
     static List<Row> oneOfEach() throws Exception {
         String station = "S/L/=A+B-1/x";
-        return List.of(SampleRows.full(Customer.class, "code", "CU"), SampleRows.full(Site.class, "code", "S", "customer", "CU", "time_zone", "Europe/Paris"),
-                SampleRows.full(TransformerType.class, "code", "T"), SampleRows.full(Circuit.class, "site", "S", "code", "C", "transformer_type", "T"),
+        return List.of(SampleRows.full(Customer.class, "code", "CU"),
+                SampleRows.full(Site.class, "code", "S", "customer", "CU", "time_zone", "Europe/Paris"),
+                SampleRows.full(TransformerType.class, "code", "T"),
+                SampleRows.full(Circuit.class, "site", "S", "code", "C", "transformer_type", "T"),
                 SampleRows.full(Line.class, "site", "S", "code", "L"), SampleRows.full(ValveType.class, "code", "V"),
                 SampleRows.full(CoilType.class, "code", "CT"), SampleRows.full(DriverType.class, "code", "D"),
                 SampleRows.full(InputSetting.class, "driver_type", "D", "code", "I"), SampleRows.full(CableType.class, "code", "CA"),
                 SampleRows.full(Controller.class, "site", "S", "code", "PLC"),
                 SampleRows.full(Station.class, "site", "S", "line", "L", "tag", "=A+B-1/x", "controller", "PLC"),
-                SampleRows.full(Supply.class, "station", station, "circuit", "C"), SampleRows.full(SettingChoice.class, "station", station, "setting", "I"),
-                SampleRows.full(Duty.class, "station", station), SampleRows.full(Item.class, "kind", FittedKind.COIL, "serial", "7/8", "type", "CT"),
+                SampleRows.full(Supply.class, "station", station, "circuit", "C"),
+                SampleRows.full(SettingChoice.class, "station", station, "setting", "I"),
+                SampleRows.full(Duty.class, "station", station),
+                SampleRows.full(Item.class, "kind", FittedKind.COIL, "serial", "7/8", "type", "CT"),
                 SampleRows.full(Fitting.class, "station", station, "kind", FittedKind.COIL, "type", "CT", "serial", "7/8"),
                 SampleRows.full(Reading.class, "subject_kind", SubjectKind.ITEM, "subject", "coil/7/8"),
-                SampleRows.full(Concession.class, "station", station), SampleRows.full(MarketMains.class), SampleRows.full(MarketTolerance.class),
+                SampleRows.full(Concession.class, "station", station), SampleRows.full(MarketMains.class),
+                SampleRows.full(MarketTolerance.class),
                 SampleRows.full(MarketMark.class), SampleRows.full(FleetSetting.class));
     }
 
     @Test
     void everyFieldOfEveryKindComesBack() throws Exception {
         List<Row> rows = oneOfEach();
-        assertEquals(Kind.ALL.stream().map(Kind::type).toList(), rows.stream().<Class<?>>map(Row::getClass).toList(), "one row of each kind");
+        assertEquals(Kind.ALL.stream().map(Kind::type).toList(), rows.stream().<Class<?>>map(Row::getClass).toList(),
+                "one row of each kind");
         try (Register register = FleetFixture.registers().open(folder.resolve("r"), OpenMode.CREATE_NEW)) {
             register.apply(FleetFixture.inserting(rows), Progress.NONE);
             check(register, rows);

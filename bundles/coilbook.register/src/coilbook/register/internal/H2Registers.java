@@ -154,7 +154,8 @@ public final class H2Registers implements Registers {
                 Files.move(file, path.data(), StandardCopyOption.ATOMIC_MOVE);
                 folders.keep();
             } catch (IOException e) {
-                throw new CoilbookException(Reason.REGISTER, "The register " + path + " cannot be made: " + path.folder() + " may not be written.", e);
+                throw new CoilbookException(Reason.REGISTER,
+                        "The register " + path + " cannot be made: " + path.folder() + " may not be written.", e);
             } finally {
                 file.toFile().delete();
             }
@@ -186,7 +187,8 @@ public final class H2Registers implements Registers {
         try {
             FileInspection.check(path.data(), MARK);
         } catch (FileInspection.Busy e) {
-            throw new CoilbookException(Reason.REGISTER, "The register " + path + " is in use " + LockNote.holder(path.lockNote()) + ".", e);
+            throw new CoilbookException(Reason.REGISTER, "The register " + path + " is in use " + LockNote.holder(path.lockNote()) + ".",
+                    e);
         }
     }
 
@@ -195,8 +197,9 @@ public final class H2Registers implements Registers {
         try (Connection connection = data.connection()) {
             state = Migrations.state(connection);
             if (state.version() > Migrations.CURRENT) {
-                throw new CoilbookException(Reason.REGISTER, "The register " + path + " was written by a newer version of Coilbook (schema " + state.version()
-                        + "; this version knows " + Migrations.CURRENT + "). Install the newer version.");
+                throw new CoilbookException(Reason.REGISTER,
+                        "The register " + path + " was written by a newer version of Coilbook (schema " + state.version()
+                                + "; this version knows " + Migrations.CURRENT + "). Install the newer version.");
             } else if (state.version() < Migrations.CURRENT) {
                 migrate(path, connection, state.version());
             }
@@ -217,8 +220,10 @@ public final class H2Registers implements Registers {
             Database.backup(connection, copy);
             Migrations.migrate(connection, version);
         } catch (IOException e) {
-            throw new CoilbookException(Reason.REGISTER, "The register " + path + " cannot be brought to this version's form; it is as it was in "
-                    + copy + ".", e);
+            throw new CoilbookException(Reason.REGISTER,
+                    "The register " + path + " cannot be brought to this version's form; it is as it was in "
+                            + copy + ".",
+                    e);
         }
     }
 }

@@ -121,7 +121,8 @@ final class StoredRegister implements Register {
             List<R> found = new ArrayList<>(1);
             try (Connection connection = truth.connection()) {
                 Condition here = KindTable.KEY.eq(key).and(KindTable.knownAt(truth.head()));
-                new Versions<>(truth.codecs().of(kind)).lookedUp(connection, List.of(table.lookupOf(key)), here, version -> found.add(version.row()));
+                new Versions<>(truth.codecs().of(kind)).lookedUp(connection, List.of(table.lookupOf(key)), here,
+                        version -> found.add(version.row()));
             }
             return found.isEmpty() ? null : found.get(0);
         });

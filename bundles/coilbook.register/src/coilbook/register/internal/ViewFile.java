@@ -36,7 +36,8 @@ final class ViewFile implements AutoCloseable {
                 return left;
             }
             if (!path.view().toFile().delete()) {
-                throw new CoilbookException(Reason.REGISTER, path.view() + " is of no use and cannot be removed; remove it, it will be made anew.");
+                throw new CoilbookException(Reason.REGISTER,
+                        path.view() + " is of no use and cannot be removed; remove it, it will be made anew.");
             }
         }
         Database made = Database.open(path.with(".view").toString(), true);

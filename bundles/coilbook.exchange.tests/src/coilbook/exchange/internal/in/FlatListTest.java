@@ -349,6 +349,13 @@ class FlatListTest {
     }
 
     @Test
+    void aColumnMapForAnotherFileIsSaid() throws Exception {
+        Incoming incoming = read(Map.of("Ohm-Wert", "reading.winding_resistance"), text(folder, "list.csv", "Site,Line,Station", "S,L,1"));
+        assertEquals(List.of("column map, column Ohm-Wert: no file has this heading"),
+                incoming.notices().stream().map(notice -> notice.sentence()).toList());
+    }
+
+    @Test
     void headingsThatAreNearlyKnownAreNotPassedOverInSilence() throws Exception {
         Incoming incoming = read(
                 text(folder, "list.csv", "Site,Line,Station,Coil resistnce,Colour,Cable length [furlong]", "S,L,1,5,red,3"));

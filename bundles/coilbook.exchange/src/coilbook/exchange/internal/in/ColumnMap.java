@@ -1,9 +1,11 @@
 package coilbook.exchange.internal.in;
 
-import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.HashSet;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 
 import coilbook.fleet.CoilbookException;
 
@@ -11,6 +13,8 @@ import coilbook.fleet.CoilbookException;
 final class ColumnMap {
 
     private final Map<String, String> byHeading = new HashMap<>();
+    private final Map<String, String> names = new LinkedHashMap<>();
+    private final Set<String> met = new HashSet<>();
 
     ColumnMap(Map<String, String> columns, List<Layout> layouts) throws CoilbookException {
         for (Map.Entry<String, String> entry : columns.entrySet()) {
@@ -20,16 +24,22 @@ final class ColumnMap {
                         + "\", which is no field; expected for example station.tag, coil.serial, duty.cycle_rate, reading.winding_resistance, or an empty text");
             }
             byHeading.put(Texts.fold(entry.getKey()), id);
+            names.put(Texts.fold(entry.getKey()), entry.getKey());
         }
     }
 
     /** The field's id, an empty text for a column to pass over, {@code null} where nothing is said. */
     String get(String heading) {
-        return byHeading.get(Texts.fold(heading));
+        if (byHeading.isEmpty()) {
+            return null;
+        }
+        String folded = Texts.fold(heading);
+        met.add(folded);
+        return byHeading.get(folded);
     }
 
-    /** The headings said, for headings that no file has. */
-    List<String> headings() {
-        return new ArrayList<>(byHeading.keySet());
+    /** Headings that a person spoke of and no file has. */
+    List<String> neverMet() {
+        return names.entrySet().stream().filter(entry -> !met.contains(entry.getKey())).map(Map.Entry::getValue).toList();
     }
 }

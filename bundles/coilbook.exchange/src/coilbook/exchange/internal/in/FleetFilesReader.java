@@ -38,6 +38,9 @@ public final class FleetFilesReader implements FleetFiles {
                 new OneFile(file, layouts, map, gathering, pool, countries, progress).read();
             }
         }
+        for (String heading : map.neverMet()) {
+            gathering.notice(new InputProblem("column map", "", 0, heading, "", "no file has this heading"));
+        }
         return gathering.incoming();
     }
 
@@ -108,6 +111,7 @@ public final class FleetFilesReader implements FleetFiles {
                     progress.report(step, number, 0);
                 }
                 reader.row(number, cells);
+                gathering.refuseTooMany(file.name());
             });
             reader.finish();
             return reader;

@@ -10,6 +10,7 @@ import java.util.Set;
 
 import coilbook.exchange.Incoming;
 import coilbook.exchange.RowPatch;
+import coilbook.fleet.CoilbookException;
 import coilbook.fleet.Datum;
 import coilbook.fleet.Field;
 import coilbook.fleet.FieldText;
@@ -51,6 +52,15 @@ final class Gathering {
 
     void reject(InputProblem problem) {
         rejected.add(problem);
+    }
+
+    /** Ends the reading of a file that is wrong throughout: nobody reads so many lines, and the list would fill the memory. */
+    void refuseTooMany(String file) throws CoilbookException {
+        if (rejected.size() > InputLimits.REJECTIONS || notices.size() > InputLimits.REJECTIONS) {
+            List<InputProblem> first = rejected.isEmpty() ? notices : rejected;
+            throw Refusal.of(file, "more than " + InputLimits.REJECTIONS + " values cannot be taken, which is the limit; the first: "
+                    + first.get(0).sentence());
+        }
     }
 
     void notice(InputProblem notice) {

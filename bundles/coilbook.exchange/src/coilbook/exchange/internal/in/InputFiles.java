@@ -22,7 +22,8 @@ final class InputFiles {
     }
 
     static InputFile open(Path path, ToIntFunction<List<String>> headings) throws CoilbookException {
-        String name = path.getFileName() == null ? path.toString() : path.getFileName().toString();
+        Path last = path.getFileName();
+        String name = last == null ? path.toString() : last.toString();
         if (!Files.exists(path)) {
             throw Refusal.of(name, "there is no such file; expected an XLSX workbook or a CSV or TSV list");
         } else if (Files.isDirectory(path)) {

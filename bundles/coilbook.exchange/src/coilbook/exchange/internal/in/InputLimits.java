@@ -32,6 +32,8 @@ final class InputLimits {
     /** A heading row is looked for among this many filled rows. */
     static final int HEADING_ROWS = 40;
 
+    /** Values that cannot be taken, and remarks, of all files of one reading. */
+    static final int REJECTIONS = 20_000;
     /** Headings are looked for in this many columns. */
     static final int HEADING_COLUMNS = 600;
     /** A longer text is no heading. */

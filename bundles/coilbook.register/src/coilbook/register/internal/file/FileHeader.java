@@ -40,7 +40,8 @@ final class FileHeader {
         }
     }
 
-    private static void checkLastChunk(Path file, RandomAccessFile in, long length, Map<String, String> header) throws IOException, CoilbookException {
+    private static void checkLastChunk(Path file, RandomAccessFile in, long length, Map<String, String> header)
+            throws IOException, CoilbookException {
         long start = Long.parseLong(header.getOrDefault("block", "0"), 16) * BLOCK;
         Map<String, String> chunk = start + BLOCK <= length ? map(in, start, "chunk:") : Map.of();
         long blocks = Long.parseLong(chunk.getOrDefault("len", "0"), 16);

@@ -91,7 +91,8 @@ public final class FileInspection {
         if (e.getErrorCode() == DataUtils.ERROR_FILE_LOCKED) {
             return new Busy(file + " is in use.", e);
         } else if (e.getErrorCode() == DataUtils.ERROR_UNSUPPORTED_FORMAT) {
-            return new CoilbookException(Reason.REGISTER, file + " was written by a newer version of the database; this version cannot read it.", e);
+            return new CoilbookException(Reason.REGISTER,
+                    file + " was written by a newer version of the database; this version cannot read it.", e);
         }
         for (Throwable cause = e; cause != null; cause = cause.getCause()) {
             if (cause instanceof ForeignContent found) {

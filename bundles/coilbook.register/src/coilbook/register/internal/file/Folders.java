@@ -57,7 +57,8 @@ public final class Folders implements AutoCloseable {
         } else if (!Files.isWritable(file)) {
             throw new CoilbookException(Reason.REGISTER, file + " may not be written.");
         } else if (!Files.isWritable(file.getParent())) {
-            throw new CoilbookException(Reason.REGISTER, "The folder " + file.getParent() + " may not be written; a register needs it for its view.");
+            throw new CoilbookException(Reason.REGISTER,
+                    "The folder " + file.getParent() + " may not be written; a register needs it for its view.");
         }
     }
 

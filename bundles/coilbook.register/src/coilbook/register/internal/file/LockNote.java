@@ -21,7 +21,8 @@ public final class LockNote {
 
     /** Writes the note; without one, others only learn that the register is in use. */
     public static void write(Path note) {
-        String text = "user " + System.getProperty("user.name", "unknown") + "\nprocess " + ProcessHandle.current().pid() + "\nmachine " + machine()
+        String text = "user " + System.getProperty("user.name", "unknown") + "\nprocess " + ProcessHandle.current().pid() + "\nmachine "
+                + machine()
                 + "\nsince " + LocalDateTime.now().truncatedTo(ChronoUnit.SECONDS) + "\n";
         try {
             Files.writeString(note, text, StandardCharsets.UTF_8);

@@ -29,14 +29,16 @@ public final class RegisterPath {
         Path absolute = given.toAbsolutePath().normalize();
         String text = absolute.toString();
         if (absolute.getFileName() == null || Files.isDirectory(absolute)) {
-            throw new CoilbookException(Reason.REGISTER, absolute + " is a folder; a register needs a name in it, for example " + absolute.resolve("fleet") + ".");
+            throw new CoilbookException(Reason.REGISTER,
+                    absolute + " is a folder; a register needs a name in it, for example " + absolute.resolve("fleet") + ".");
         } else if (text.indexOf(';') >= 0 || text.chars().anyMatch(c -> c < 0x20 || c == 0x7f)) {
             throw new CoilbookException(Reason.REGISTER, "A register's path may hold no semicolon and no control character: "
                     + text.replaceAll("\\p{Cntrl}", "?") + ".");
         }
         String name = absolute.getFileName().toString();
         return new RegisterPath(name.endsWith(ENDING) && name.length() > ENDING.length()
-                ? absolute.resolveSibling(name.substring(0, name.length() - ENDING.length())) : absolute);
+                ? absolute.resolveSibling(name.substring(0, name.length() - ENDING.length()))
+                : absolute);
     }
 
     public Path base() {

@@ -17,12 +17,15 @@ final class SchemaWords {
     private static final Pattern TABLE = Pattern.compile("CREATE CACHED TABLE \"PUBLIC\"\\.\"([A-Z0-9_]+)\"\\(");
     private static final Pattern SETTING = Pattern.compile("SET CREATE_BUILD \\d{1,6}");
     private static final Pattern USER = Pattern.compile("CREATE USER IF NOT EXISTS \"COILBOOK\" SALT '[0-9a-f]*' HASH '[0-9a-f]*' ADMIN");
-    private static final Set<String> TABLE_WORDS = Set.of("CREATE", "CACHED", "TABLE", "NOT", "NULL", "SELECTIVITY", "BIGINT", "INTEGER", "SMALLINT",
+    private static final Set<String> TABLE_WORDS = Set.of("CREATE", "CACHED", "TABLE", "NOT", "NULL", "SELECTIVITY", "BIGINT", "INTEGER",
+            "SMALLINT",
             "DOUBLE", "PRECISION", "BOOLEAN", "DATE", "TIMESTAMP", "NUMERIC", "CHARACTER", "VARYING");
-    private static final Set<String> INDEX_WORDS = Set.of("CREATE", "PRIMARY", "KEY", "INDEX", "UNIQUE", "ON", "NULLS", "FIRST", "LAST", "DISTINCT",
+    private static final Set<String> INDEX_WORDS = Set.of("CREATE", "PRIMARY", "KEY", "INDEX", "UNIQUE", "ON", "NULLS", "FIRST", "LAST",
+            "DISTINCT",
             "ASC", "DESC");
     private static final Set<String> CONSTRAINT_WORDS = Set.of("ALTER", "TABLE", "ADD", "CONSTRAINT", "PRIMARY", "KEY", "INDEX");
-    private static final String[] OBJECTS = { "a table or view", "an index", "a user", "a sequence", "a trigger", "a constraint", "a setting", "a role",
+    private static final String[] OBJECTS = { "a table or view", "an index", "a user", "a sequence", "a trigger", "a constraint",
+            "a setting", "a role",
             "a right", "a function of its own", "a schema", "a constant", "a domain", "a comment", "an aggregate of its own", "a synonym" };
 
     private final Set<String> tables = new HashSet<>();

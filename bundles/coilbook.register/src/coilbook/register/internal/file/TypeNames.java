@@ -16,7 +16,8 @@ final class TypeNames extends BasicDataType<String> {
     private static final String DB = "org.h2.mvstore.db.";
     private static final String TYPE = "org.h2.mvstore.type.";
     /** Types that are nothing but their name. */
-    private static final Set<String> PLAIN = Set.of(DB + "NullValueDataType", DB + "LobStorageMap$BlobMeta$Type", DB + "LobStorageMap$BlobReference$Type",
+    private static final Set<String> PLAIN = Set.of(DB + "NullValueDataType", DB + "LobStorageMap$BlobMeta$Type",
+            DB + "LobStorageMap$BlobReference$Type",
             TYPE + "LongDataType", TYPE + "IntegerDataType", TYPE + "StringDataType", TYPE + "ByteArrayDataType");
 
     @Override

@@ -40,7 +40,8 @@ import coilbook.register.internal.store.Versions;
 public final class GroupRows {
 
     /** The kinds held here; a Change of any of them makes the held rows old. */
-    public static final Set<Class<? extends Row>> KINDS = Set.of(Customer.class, Site.class, Line.class, Circuit.class, TransformerType.class,
+    public static final Set<Class<? extends Row>> KINDS = Set.of(Customer.class, Site.class, Line.class, Circuit.class,
+            TransformerType.class,
             Controller.class, ValveType.class, CoilType.class, DriverType.class, InputSetting.class, CableType.class, MarketMains.class,
             MarketTolerance.class, MarketMark.class, FleetSetting.class);
 
@@ -70,9 +71,11 @@ public final class GroupRows {
         return new GroupRows(rows);
     }
 
-    private static <R extends Row> Map<String, Row> load(Connection connection, Codecs codecs, Kind<R> kind, long known) throws SQLException {
+    private static <R extends Row> Map<String, Row> load(Connection connection, Codecs codecs, Kind<R> kind, long known)
+            throws SQLException {
         Map<String, Row> found = new TreeMap<>();
-        new Versions<>(codecs.of(kind)).each(connection, KindTable.knownAt(known), List.of(), version -> found.put(version.key(), version.row()));
+        new Versions<>(codecs.of(kind)).each(connection, KindTable.knownAt(known), List.of(),
+                version -> found.put(version.key(), version.row()));
         return found;
     }
 

@@ -115,7 +115,8 @@ final class StationRows {
 
     /** The stations where an item sat on the day, in order. */
     List<String> places(String itemKey) {
-        return places.getOrDefault(itemKey, List.of()).stream().filter(fitting -> fitting.trueOn(snapshot.trueOn())).map(Fitting::station).distinct()
+        return places.getOrDefault(itemKey, List.of()).stream().filter(fitting -> fitting.trueOn(snapshot.trueOn())).map(Fitting::station)
+                .distinct()
                 .sorted().toList();
     }
 

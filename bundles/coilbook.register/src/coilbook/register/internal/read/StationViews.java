@@ -73,18 +73,23 @@ public final class StationViews {
                 .sorted(StationRows.NEWEST_LAST.reversed().thenComparing(Timed::key)).toList();
         DriverType driver = groups.find(DriverType.class, type(fittings, FittedKind.DRIVER));
         SettingChoice choice = rows.now(SettingChoice.class, code);
-        InputSetting setting = driver == null || choice == null ? null : groups.find(InputSetting.class, driver.code() + "/" + choice.setting());
+        InputSetting setting = driver == null || choice == null ? null
+                : groups.find(InputSetting.class, driver.code() + "/" + choice.setting());
         List<Reading> all = readings(code, circuit, fittings, rows);
-        List<Reading> taken = all.stream().filter(reading -> !reading.takenAt().toLocalDate().isAfter(snapshot.trueOn())).sorted(NEWEST_FIRST).toList();
+        List<Reading> taken = all.stream().filter(reading -> !reading.takenAt().toLocalDate().isAfter(snapshot.trueOn()))
+                .sorted(NEWEST_FIRST).toList();
         List<Concession> concessions = rows.all(Concession.class, code).stream().filter(concession -> concession.trueOn(snapshot.trueOn()))
                 .sorted(Comparator.comparing(Concession::key)).toList();
         StationView view = new StationView(snapshot.trueOn(), station, groups.find(Line.class, station.lineKey()), site,
                 site == null ? null : groups.find(Customer.class, site.customer()), supply, circuit,
                 circuit == null ? null : groups.find(TransformerType.class, circuit.transformerType()), choice, setting,
                 driver == null ? List.of() : groups.settings(driver.code()), rows.now(Duty.class, code),
-                groups.find(Controller.class, References.controllerKey(station)), groups.find(ValveType.class, type(fittings, FittedKind.VALVE)),
-                groups.find(CoilType.class, type(fittings, FittedKind.COIL)), driver, groups.find(CableType.class, type(fittings, FittedKind.CABLE)),
-                fittings, past, taken, concessions, places(fittings, rows), site == null ? null : groups.market(site), groups.fleetSettings());
+                groups.find(Controller.class, References.controllerKey(station)),
+                groups.find(ValveType.class, type(fittings, FittedKind.VALVE)),
+                groups.find(CoilType.class, type(fittings, FittedKind.COIL)), driver,
+                groups.find(CableType.class, type(fittings, FittedKind.CABLE)),
+                fittings, past, taken, concessions, places(fittings, rows), site == null ? null : groups.market(site),
+                groups.fleetSettings());
         return new LoadedStation(version.rowId(), view, rows.turnsOn(station, all));
     }
 

@@ -31,7 +31,8 @@ public final class StationWalk {
     }
 
     /** Every station of a scope, in batches of {@link StationViews#BATCH}. */
-    public void each(Connection connection, FleetScope scope, GroupRows groups, long known, Taker taker) throws SQLException, CoilbookException {
+    public void each(Connection connection, FleetScope scope, GroupRows groups, long known, Taker taker)
+            throws SQLException, CoilbookException {
         List<Versions.Version<Station>> waiting = new ArrayList<>();
         for (Span span : Span.of(scope, groups)) {
             String last = span.after();
@@ -58,7 +59,8 @@ public final class StationWalk {
         List<String> sorted = List.copyOf(new TreeSet<>(codes));
         for (int i = 0; i < sorted.size(); i += StationViews.BATCH) {
             List<Versions.Version<Station>> batch = new ArrayList<>();
-            versions.lookedUp(connection, sorted.subList(i, Math.min(sorted.size(), i + StationViews.BATCH)), KindTable.knownAt(known), batch::add);
+            versions.lookedUp(connection, sorted.subList(i, Math.min(sorted.size(), i + StationViews.BATCH)), KindTable.knownAt(known),
+                    batch::add);
             batch.sort(Comparator.comparing(Versions.Version::key));
             if (!batch.isEmpty()) {
                 taker.take(batch);

@@ -101,14 +101,16 @@ public final class Truth {
         try (Connection connection = connection()) {
             GroupRows shared = groups(connection, snapshot.known());
             StationViews views = new StationViews(codecs);
-            new StationWalk(codecs).each(connection, codes, snapshot.known(), batch -> taker.take(views.of(connection, batch, shared, snapshot)));
+            new StationWalk(codecs).each(connection, codes, snapshot.known(),
+                    batch -> taker.take(views.of(connection, batch, shared, snapshot)));
         }
     }
 
     /** How many stations there were at a sequence. */
     public long countStations(long known) throws SQLException {
         try (Connection connection = connection()) {
-            return Database.dsl(connection).select(DSL.count()).from(KindTable.of(coilbook.fleet.Station.class).table()).where(KindTable.knownAt(known))
+            return Database.dsl(connection).select(DSL.count()).from(KindTable.of(coilbook.fleet.Station.class).table())
+                    .where(KindTable.knownAt(known))
                     .fetchOne(0, Long.class);
         }
     }

@@ -148,12 +148,14 @@ final class Affected {
     private Set<String> resolve(Connection connection, long known) throws SQLException {
         GroupRows groups = truth.groups(connection, known);
         groups.all(Site.class).stream().filter(site -> customers.contains(site.customer())).forEach(site -> sites.add(site.code()));
-        groups.all(Circuit.class).stream().filter(circuit -> transformers.contains(circuit.transformerType())).forEach(c -> circuits.add(c.key()));
+        groups.all(Circuit.class).stream().filter(circuit -> transformers.contains(circuit.transformerType()))
+                .forEach(c -> circuits.add(c.key()));
         Set<String> found = new TreeSet<>(stations);
         if (!sites.isEmpty() || !lines.isEmpty() || !controllers.isEmpty()) {
             new Versions<>(truth.codecs().of(Kind.of(Station.class))).each(connection, KindTable.knownAt(known), List.of(), version -> {
                 Station station = version.row();
-                if (sites.contains(station.site()) || lines.contains(station.lineKey()) || controllers.contains(References.controllerKey(station))) {
+                if (sites.contains(station.site()) || lines.contains(station.lineKey())
+                        || controllers.contains(References.controllerKey(station))) {
                     found.add(version.key());
                 }
             });

@@ -24,7 +24,8 @@ public final class CriteriaJudging implements Judging {
 
     public CriteriaJudging(Assessor assessor) {
         this.assessor = assessor;
-        this.version = EngineVersion.of(StationElectrics.class, "coilbook.electrics") + ", " + EngineVersion.of(Assessor.class, "coilbook.criteria");
+        this.version = EngineVersion.of(StationElectrics.class, "coilbook.electrics") + ", "
+                + EngineVersion.of(Assessor.class, "coilbook.criteria");
     }
 
     @Override

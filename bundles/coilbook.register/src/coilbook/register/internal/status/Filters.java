@@ -53,7 +53,8 @@ final class Filters {
         for (String line : scope.lines()) {
             int slash = line.indexOf('/');
             if (slash > 0) {
-                any = any.or(text(StatusColumn.SITE).eq(line.substring(0, slash)).and(text(StatusColumn.LINE).eq(line.substring(slash + 1))));
+                any = any.or(
+                        text(StatusColumn.SITE).eq(line.substring(0, slash)).and(text(StatusColumn.LINE).eq(line.substring(slash + 1))));
             }
         }
         for (String station : scope.stations()) {
@@ -70,7 +71,8 @@ final class Filters {
     private static Condition of(StatusColumn column, String expression) throws CoilbookException {
         Matcher comparison = COMPARISON.matcher(expression);
         if (column.type() == FieldType.TEXT) {
-            return comparison.matches() ? compared(text(column), comparison.group(1), comparison.group(2).strip()) : words(text(column), expression);
+            return comparison.matches() ? compared(text(column), comparison.group(1), comparison.group(2).strip())
+                    : words(text(column), expression);
         }
         Matcher range = RANGE.matcher(expression);
         if (comparison.matches()) {
@@ -114,7 +116,8 @@ final class Filters {
         try {
             number = QuantityText.parse(column.heading(), value, column.unit());
         } catch (InvalidValue e) {
-            throw new CoilbookException(Reason.BAD_INPUT, column.heading() + ": " + value + " is no value to look for; expected " + e.expected() + ".", e);
+            throw new CoilbookException(Reason.BAD_INPUT,
+                    column.heading() + ": " + value + " is no value to look for; expected " + e.expected() + ".", e);
         }
         double slack = Math.abs(number) * EQUAL;
         return switch (sign) {

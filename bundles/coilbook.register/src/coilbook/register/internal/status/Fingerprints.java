@@ -38,7 +38,8 @@ final class Fingerprints {
             digest.add(rows.size());
             rows.forEach(row -> add(digest, row));
         }
-        for (Row row : new Row[] { view.line(), view.site(), view.customer(), view.circuit(), view.transformer(), view.setting(), view.controller(),
+        for (Row row : new Row[] { view.line(), view.site(), view.customer(), view.circuit(), view.transformer(), view.setting(),
+                view.controller(),
                 view.valve(), view.coil(), view.driver(), view.cable() }) {
             digest.add(row == null ? null : once(row, d -> add(d, row)));
         }

@@ -143,7 +143,8 @@ public final class LiveStatus implements Status {
         return judged;
     }
 
-    private long run(FleetScope scope, Collection<String> affected, Snapshot snapshot, Progress progress) throws SQLException, CoilbookException {
+    private long run(FleetScope scope, Collection<String> affected, Snapshot snapshot, Progress progress)
+            throws SQLException, CoilbookException {
         long count = affected == null ? truth.countStations(snapshot.known()) : affected.size();
         Collection<String> sought = affected == null ? List.of() : affected;
         try (Recheck recheck = new Recheck(view, writer, judging, snapshot.trueOn(), sought, count, progress)) {
@@ -169,8 +170,9 @@ public final class LiveStatus implements Status {
     /** The numbers of rows whose station is no longer there, from one scan. */
     private List<Long> notIn(Set<Long> seen) throws SQLException {
         List<Long> gone = new ArrayList<>();
-        try (Connection connection = view.connection(); Cursor<Record1<Long>> rows = Database.dsl(connection).select(ViewTables.ID)
-                .from(ViewTables.STATUS).fetchLazy()) {
+        try (Connection connection = view.connection();
+                Cursor<Record1<Long>> rows = Database.dsl(connection).select(ViewTables.ID)
+                        .from(ViewTables.STATUS).fetchLazy()) {
             for (Record1<Long> row : rows) {
                 if (!seen.contains(row.value1())) {
                     gone.add(row.value1());
@@ -185,8 +187,9 @@ public final class LiveStatus implements Status {
             return List.of();
         }
         List<Long> gone = new ArrayList<>();
-        try (Connection connection = view.connection(); Cursor<Record2<Long, String>> rows = Database.dsl(connection)
-                .select(ViewTables.ID, ViewTables.text(StatusColumn.STATION)).from(ViewTables.STATUS).fetchLazy()) {
+        try (Connection connection = view.connection();
+                Cursor<Record2<Long, String>> rows = Database.dsl(connection)
+                        .select(ViewTables.ID, ViewTables.text(StatusColumn.STATION)).from(ViewTables.STATUS).fetchLazy()) {
             for (Record2<Long, String> row : rows) {
                 if (codes.contains(row.value2())) {
                     gone.add(row.value1());

@@ -57,7 +57,8 @@ final class PlaceTree {
     }
 
     private static Counts sum(Counts one, Counts other) {
-        return new Counts(one.stations() + other.stations(), one.hazards() + other.hazards(), one.nonconformities() + other.nonconformities(),
+        return new Counts(one.stations() + other.stations(), one.hazards() + other.hazards(),
+                one.nonconformities() + other.nonconformities(),
                 one.observations() + other.observations(), one.undetermined() + other.undetermined(), one.conceded() + other.conceded());
     }
 }

@@ -50,7 +50,8 @@ final class Recheck implements AutoCloseable {
     private long judged;
 
     /** @param sought the codes that are looked for, or an empty list for all stations */
-    Recheck(Database view, StatusWriter writer, Judging judging, LocalDate today, Collection<String> sought, long total, Progress progress) {
+    Recheck(Database view, StatusWriter writer, Judging judging, LocalDate today, Collection<String> sought, long total,
+            Progress progress) {
         this.absent = new HashSet<>(sought);
         this.view = view;
         this.writer = writer;
@@ -150,7 +151,8 @@ final class Recheck implements AutoCloseable {
             throw new IllegalStateException(e.getCause());
         } catch (InterruptedException e) {
             Thread.currentThread().interrupt();
-            throw new CoilbookException(Reason.CANCELLED, "Interrupted. What was judged so far is kept; the rest is judged the next time.", e);
+            throw new CoilbookException(Reason.CANCELLED, "Interrupted. What was judged so far is kept; the rest is judged the next time.",
+                    e);
         }
         if (!lines.isEmpty()) {
             writer.write(lines);

@@ -127,8 +127,9 @@ final class StatusReader {
             for (StatusRow row : rows(window)) {
                 if (row != null) {
                     for (Finding finding : findings.getOrDefault(row.id(), List.of())) {
-                        consumer.accept(new Status.StationFinding((String) row.get(StatusColumn.CUSTOMER), (String) row.get(StatusColumn.SITE),
-                                (String) row.get(StatusColumn.LINE), row.station(), finding));
+                        consumer.accept(
+                                new Status.StationFinding((String) row.get(StatusColumn.CUSTOMER), (String) row.get(StatusColumn.SITE),
+                                        (String) row.get(StatusColumn.LINE), row.station(), finding));
                     }
                 }
             }
@@ -155,7 +156,8 @@ final class StatusReader {
 
     private static void read(Connection connection, long first, long last, Map<Long, List<Finding>> into) throws SQLException {
         try (Cursor<Record> cursor = Database.dsl(connection).select(ViewTables.FINDING_FIELDS).from(ViewTables.FINDING)
-                .where(ViewTables.FINDING_ID.ge(first * ViewTables.FINDINGS).and(ViewTables.FINDING_ID.lt((last + 1) * ViewTables.FINDINGS)))
+                .where(ViewTables.FINDING_ID.ge(first * ViewTables.FINDINGS)
+                        .and(ViewTables.FINDING_ID.lt((last + 1) * ViewTables.FINDINGS)))
                 .orderBy(ViewTables.FINDING_ID).fetchLazy()) {
             ResultSet line = cursor.resultSet();
             while (line.next()) {
@@ -174,7 +176,8 @@ final class StatusReader {
     private static List<Field<?>> counted() {
         List<Field<?>> fields = new ArrayList<>(MOST_COUNTED);
         fields.add(DSL.count());
-        for (StatusColumn column : List.of(StatusColumn.HAZARDS, StatusColumn.NONCONFORMITIES, StatusColumn.OBSERVATIONS, StatusColumn.UNDETERMINED,
+        for (StatusColumn column : List.of(StatusColumn.HAZARDS, StatusColumn.NONCONFORMITIES, StatusColumn.OBSERVATIONS,
+                StatusColumn.UNDETERMINED,
                 StatusColumn.CONCEDED)) {
             fields.add(DSL.sum(DSL.field(DSL.name(column.id()), Integer.class)));
         }

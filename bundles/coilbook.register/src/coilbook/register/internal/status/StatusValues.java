@@ -33,7 +33,8 @@ final class StatusValues {
     private static Object computed(StatusColumn column, Judged judged) {
         Counts counts = judged.counts();
         return switch (column) {
-            case VERDICT -> counts.hazards() > 0 ? "hazard" : judged.worst() == Verdict.NOT_APPLICABLE ? Verdict.CONFORMITY.label() : judged.worst().label();
+            case VERDICT -> counts.hazards() > 0 ? "hazard"
+                    : judged.worst() == Verdict.NOT_APPLICABLE ? Verdict.CONFORMITY.label() : judged.worst().label();
             case HAZARDS -> (int) counts.hazards();
             case NONCONFORMITIES -> (int) counts.nonconformities();
             case OBSERVATIONS -> (int) counts.observations();

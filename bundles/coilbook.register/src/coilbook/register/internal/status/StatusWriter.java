@@ -36,7 +36,8 @@ final class StatusWriter {
      * @param known whether a row with this id is there to be replaced
      * @param values in the order of the shown columns
      */
-    record Line(long id, boolean known, String fingerprint, LocalDate judgedOn, LocalDate recheckOn, int rank, Object[] values, List<Finding> findings) {
+    record Line(long id, boolean known, String fingerprint, LocalDate judgedOn, LocalDate recheckOn, int rank, Object[] values,
+            List<Finding> findings) {
     }
 
     void write(Collection<Line> lines) throws SQLException {
@@ -92,10 +93,12 @@ final class StatusWriter {
         }
         Field<Long> low = DSL.param("low", Long.class);
         Field<Long> high = DSL.param("high", Long.class);
-        String findings = Database.renderer().deleteFrom(ViewTables.FINDING).where(ViewTables.FINDING_ID.ge(low).and(ViewTables.FINDING_ID.lt(high)))
+        String findings = Database.renderer().deleteFrom(ViewTables.FINDING)
+                .where(ViewTables.FINDING_ID.ge(low).and(ViewTables.FINDING_ID.lt(high)))
                 .getSQL();
         String status = Database.renderer().deleteFrom(ViewTables.STATUS).where(ViewTables.ID.eq(low)).getSQL();
-        try (PreparedStatement finding = connection.prepareStatement(findings); PreparedStatement row = connection.prepareStatement(status)) {
+        try (PreparedStatement finding = connection.prepareStatement(findings);
+                PreparedStatement row = connection.prepareStatement(status)) {
             for (long id : ids) {
                 finding.setLong(1, id * ViewTables.FINDINGS);
                 finding.setLong(2, (id + 1) * ViewTables.FINDINGS);

@@ -52,7 +52,8 @@ final class ViewTables {
     static final Field<String> NUMBERS = DSL.field(DSL.name("numbers"), SQLDataType.VARCHAR(100000).notNull());
     static final Field<String> MISSING = DSL.field(DSL.name("missing"), SQLDataType.VARCHAR(100000).notNull());
 
-    static final List<Field<?>> FINDING_FIELDS = List.of(FINDING_ID, CRITERION, VERDICT, HAZARD, CONCEDED, FOUND, BOUND, UNIT, CORNER, SENTENCE,
+    static final List<Field<?>> FINDING_FIELDS = List.of(FINDING_ID, CRITERION, VERDICT, HAZARD, CONCEDED, FOUND, BOUND, UNIT, CORNER,
+            SENTENCE,
             PROVENANCE, NUMBERS, MISSING);
 
     private static final List<Field<?>> COLUMNS = columns();
@@ -98,6 +99,7 @@ final class ViewTables {
         dsl.createTable(STATE).columns(VIEW_VERSION, ENGINE, REGISTER_ID, SEQ, STATE_DAY).execute();
         dsl.createTable(STATUS).columns(statusFields()).primaryKey(ID).execute();
         dsl.createTable(FINDING).columns(FINDING_FIELDS).primaryKey(FINDING_ID).execute();
-        dsl.createIndex(DSL.name("status_place")).on(STATUS, text(StatusColumn.SITE), text(StatusColumn.LINE), text(StatusColumn.STATION)).execute();
+        dsl.createIndex(DSL.name("status_place")).on(STATUS, text(StatusColumn.SITE), text(StatusColumn.LINE), text(StatusColumn.STATION))
+                .execute();
     }
 }

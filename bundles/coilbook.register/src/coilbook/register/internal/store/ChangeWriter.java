@@ -72,7 +72,8 @@ final class ChangeWriter {
         if (last != null && when.isBefore(last.when())) {
             when = last.when();
         }
-        RowDigest digest = entryDigest(new JournalEntry(seq, change.who(), when, change.why(), compensates, change.rows().size(), ""), previous);
+        RowDigest digest = entryDigest(new JournalEntry(seq, change.who(), when, change.why(), compensates, change.rows().size(), ""),
+                previous);
         List<Journal.Part> parts = new ArrayList<>();
         Map<Kind<?>, List<RowChange>> byKind = new HashMap<>();
         change.rows().forEach(row -> byKind.computeIfAbsent(row.kind(), kind -> new ArrayList<>()).add(row));
@@ -126,7 +127,8 @@ final class ChangeWriter {
         return null;
     }
 
-    private <R extends Row> Journal.Part write(Kind<R> kind, List<RowChange> rows, RowDigest digest) throws SQLException, CoilbookException {
+    private <R extends Row> Journal.Part write(Kind<R> kind, List<RowChange> rows, RowDigest digest)
+            throws SQLException, CoilbookException {
         RowCodec<R> codec = codecs.of(kind);
         Versions<R> versions = new Versions<>(codec);
         long firstVersion = versions.nextVersion(connection);
@@ -146,7 +148,8 @@ final class ChangeWriter {
         return new Journal.Part(seq, kind, firstVersion, opened, closing.size());
     }
 
-    private <R extends Row> Map<String, Versions.Version<R>> present(Versions<R> versions, Kind<R> kind, List<RowChange> rows) throws SQLException {
+    private <R extends Row> Map<String, Versions.Version<R>> present(Versions<R> versions, Kind<R> kind, List<RowChange> rows)
+            throws SQLException {
         Set<String> keys = new HashSet<>(rows.size() * 2);
         Set<String> lookups = new HashSet<>();
         KindTable<R> table = KindTable.of(kind);
@@ -163,7 +166,8 @@ final class ChangeWriter {
         return present;
     }
 
-    private static <R extends Row> void checkBefore(RowCodec<R> codec, RowChange row, Versions.Version<R> version) throws CoilbookException {
+    private static <R extends Row> void checkBefore(RowCodec<R> codec, RowChange row, Versions.Version<R> version)
+            throws CoilbookException {
         Kind<?> kind = row.kind();
         if (row.before() == null && version != null) {
             throw Refusal.stale(kind, row.key(), "it is there already");

@@ -54,13 +54,15 @@ public final class Journal {
 
     /** Entries after a sequence, the oldest first. */
     public List<JournalEntry> after(Connection connection, long seq, int max) {
-        return Database.dsl(connection).select(columns()).from(Tables.Journal.TABLE).where(Tables.Journal.SEQ.gt(seq)).orderBy(Tables.Journal.SEQ)
+        return Database.dsl(connection).select(columns()).from(Tables.Journal.TABLE).where(Tables.Journal.SEQ.gt(seq))
+                .orderBy(Tables.Journal.SEQ)
                 .limit(max).fetch(Journal::entry);
     }
 
     /** The sequence that took back another, or 0. */
     public long compensationOf(Connection connection, long seq) {
-        Long found = Database.dsl(connection).select(DSL.max(Tables.Journal.SEQ)).from(Tables.Journal.TABLE).where(Tables.Journal.COMPENSATES.eq(seq))
+        Long found = Database.dsl(connection).select(DSL.max(Tables.Journal.SEQ)).from(Tables.Journal.TABLE)
+                .where(Tables.Journal.COMPENSATES.eq(seq))
                 .fetchOne(0, Long.class);
         return found == null ? 0 : found;
     }
@@ -75,7 +77,8 @@ public final class Journal {
     /** What the Changes of a span of sequences did to each kind, in their order and in that of the kinds. */
     public List<Part> parts(Connection connection, long after, long upTo) {
         List<Part> parts = Database.dsl(connection)
-                .select(JournalKind.SEQ, JournalKind.KIND, JournalKind.FIRST_VERSION, JournalKind.OPENED, JournalKind.CLOSED).from(JournalKind.TABLE)
+                .select(JournalKind.SEQ, JournalKind.KIND, JournalKind.FIRST_VERSION, JournalKind.OPENED, JournalKind.CLOSED)
+                .from(JournalKind.TABLE)
                 .where(JournalKind.SEQ.gt(after).and(JournalKind.SEQ.le(upTo)))
                 .fetch(line -> new Part(line.value1(), kind(line.value2()), line.value3(), line.value4(), line.value5()));
         parts.sort(Comparator.comparingLong(Part::seq).thenComparing(part -> Kind.ALL.indexOf(part.kind())));
@@ -90,7 +93,8 @@ public final class Journal {
         Database.dsl(connection).insertInto(Tables.Journal.TABLE)
                 .columns(Tables.Journal.SEQ, Tables.Journal.WHO, Tables.Journal.RECORDED_AT, Tables.Journal.WHY, Tables.Journal.COMPENSATES,
                         Tables.Journal.ROW_COUNT, Tables.Journal.PREVIOUS_DIGEST, Tables.Journal.DIGEST)
-                .values(entry.seq(), entry.who(), stored(entry.when()), entry.why(), entry.compensates(), entry.rows(), previousDigest, entry.digest())
+                .values(entry.seq(), entry.who(), stored(entry.when()), entry.why(), entry.compensates(), entry.rows(), previousDigest,
+                        entry.digest())
                 .execute();
         for (Part part : parts) {
             Database.dsl(connection).insertInto(JournalKind.TABLE)

@@ -34,7 +34,8 @@ public final class KindTable<R extends Row> {
     /** Every kind's table, in the order of the kinds. */
     public static final List<KindTable<?>> ALL = Kind.ALL.stream().<KindTable<?>>map(KindTable::make).toList();
 
-    private static final Map<Kind<?>, KindTable<?>> BY_KIND = ALL.stream().collect(Collectors.toUnmodifiableMap(KindTable::kind, Function.identity()));
+    private static final Map<Kind<?>, KindTable<?>> BY_KIND = ALL.stream()
+            .collect(Collectors.toUnmodifiableMap(KindTable::kind, Function.identity()));
 
     private final Kind<R> kind;
     private final Table<Record> table;

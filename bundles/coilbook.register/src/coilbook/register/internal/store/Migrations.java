@@ -45,7 +45,8 @@ public final class Migrations {
     public static State create(Connection connection) throws SQLException, IOException {
         run(connection, 0);
         State made = new State(CURRENT, UUID.randomUUID().toString());
-        Database.dsl(connection).insertInto(Mark.TABLE, Mark.SCHEMA_VERSION, Mark.REGISTER_ID).values(made.version(), made.registerId()).execute();
+        Database.dsl(connection).insertInto(Mark.TABLE, Mark.SCHEMA_VERSION, Mark.REGISTER_ID).values(made.version(), made.registerId())
+                .execute();
         return made;
     }
 

@@ -148,7 +148,8 @@ public final class References {
     private static CoilbookException leadsNowhere(Row row, Kind<?> target, String key) {
         for (Reference reference : of(row)) {
             if (reference.target() == target && reference.key().equals(key)) {
-                return Refusal.of(Kind.of(row), row.key(), reference.field().heading(), key, "an entry of " + target.sheet() + " was expected");
+                return Refusal.of(Kind.of(row), row.key(), reference.field().heading(), key,
+                        "an entry of " + target.sheet() + " was expected");
             }
         }
         throw new IllegalStateException();
@@ -170,7 +171,8 @@ public final class References {
         keys.forEach(key -> lookups.add(table.lookupOf(key)));
         Set<String> found = new HashSet<>();
         for (List<String> part : Versions.parts(lookups)) {
-            found.addAll(Database.dsl(connection).select(KindTable.KEY).from(table.table()).where(table.lookup().in(part).and(KindTable.knownAt(head)))
+            found.addAll(Database.dsl(connection).select(KindTable.KEY).from(table.table())
+                    .where(table.lookup().in(part).and(KindTable.knownAt(head)))
                     .fetch(KindTable.KEY));
         }
         return found;
@@ -208,7 +210,8 @@ public final class References {
         Versions<R> versions = new Versions<>(codecs.of(kind));
         List<Row> dangling = new ArrayList<>();
         Set<String> stations = gone.getOrDefault(Kind.of(Station.class), Set.of());
-        boolean byStation = gone.size() == 1 && !stations.isEmpty() && stations.size() <= 10 * Versions.LIST && table.lookup() != KindTable.KEY;
+        boolean byStation = gone.size() == 1 && !stations.isEmpty() && stations.size() <= 10 * Versions.LIST
+                && table.lookup() != KindTable.KEY;
         java.util.function.Consumer<Versions.Version<R>> look = version -> {
             if (dangling.isEmpty()) {
                 for (Reference reference : of(version.row())) {
@@ -226,8 +229,10 @@ public final class References {
         }
         if (!dangling.isEmpty()) {
             Row row = dangling.get(0);
-            Reference reference = of(row).stream().filter(r -> gone.getOrDefault(r.target(), Set.of()).contains(r.key())).findFirst().orElseThrow();
-            throw Refusal.stale(reference.target(), reference.key(), "it cannot be removed while " + kind.sheet() + " " + row.key() + " refers to it");
+            Reference reference = of(row).stream().filter(r -> gone.getOrDefault(r.target(), Set.of()).contains(r.key())).findFirst()
+                    .orElseThrow();
+            throw Refusal.stale(reference.target(), reference.key(),
+                    "it cannot be removed while " + kind.sheet() + " " + row.key() + " refers to it");
         }
     }
 }

@@ -196,7 +196,8 @@ public final class RowCodec<R extends Row> {
             Object value = field.get(row);
             if (value instanceof BigDecimal amount && (amount.stripTrailingZeros().scale() > StoredColumn.MONEY_SCALE
                     || amount.setScale(0, RoundingMode.DOWN).precision() > StoredColumn.MONEY_DIGITS - StoredColumn.MONEY_SCALE)) {
-                throw new InvalidValue(field.heading(), amount.toPlainString(), "an amount with at most 20 digits before and 10 after the point");
+                throw new InvalidValue(field.heading(), amount.toPlainString(),
+                        "an amount with at most 20 digits before and 10 after the point");
             } else if (value instanceof List<?> && ((String) stored(value)).length() > 4000) {
                 throw new InvalidValue(field.heading(), "", "texts of at most 4000 characters together");
             }

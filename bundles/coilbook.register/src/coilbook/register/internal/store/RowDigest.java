@@ -74,8 +74,9 @@ public final class RowDigest {
             addAll(list.toArray());
         } else {
             out.writeByte(7);
-            text(value instanceof Labelled term ? term.label() : value instanceof BigDecimal amount ? amount.stripTrailingZeros().toPlainString()
-                    : value instanceof LocalDateTime time ? time.truncatedTo(ChronoUnit.MICROS).toString() : value.toString());
+            text(value instanceof Labelled term ? term.label()
+                    : value instanceof BigDecimal amount ? amount.stripTrailingZeros().toPlainString()
+                            : value instanceof LocalDateTime time ? time.truncatedTo(ChronoUnit.MICROS).toString() : value.toString());
         }
     }
 

@@ -30,7 +30,8 @@ public record StoredColumn(Field field, org.jooq.Field<?> value, org.jooq.Field<
     static StoredColumn of(Field field) {
         String name = RESERVED.contains(field.id()) ? field.id() + "_" : field.id();
         org.jooq.Field<Short> provenance = field.type() == coilbook.fleet.FieldType.QUANTITY
-                ? DSL.field(DSL.name(field.id() + "_prov"), SQLDataType.SMALLINT) : null;
+                ? DSL.field(DSL.name(field.id() + "_prov"), SQLDataType.SMALLINT)
+                : null;
         return new StoredColumn(field, DSL.field(DSL.name(name), type(field)), provenance);
     }
 

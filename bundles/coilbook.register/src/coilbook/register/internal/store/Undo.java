@@ -65,7 +65,8 @@ final class Undo {
         JournalEntry entry = entry();
         long already = journal.compensationOf(connection, seq);
         if (already > 0) {
-            throw new CoilbookException(Reason.BAD_INPUT, "Change " + seq + " (" + entry.why() + ") was undone already by change " + already + ".");
+            throw new CoilbookException(Reason.BAD_INPUT,
+                    "Change " + seq + " (" + entry.why() + ") was undone already by change " + already + ".");
         }
         List<RowChange> rows = new ArrayList<>(entry.rows());
         for (Journal.Part part : journal.parts(connection, seq - 1, seq)) {
@@ -74,7 +75,8 @@ final class Undo {
         return new Change(entry.who(), entry.when(), entry.why(), rows).compensating(who, Instant.now());
     }
 
-    private <R extends Row> void read(Kind<R> kind, Journal.Part part, List<RowChange> rows, boolean untouched) throws SQLException, CoilbookException {
+    private <R extends Row> void read(Kind<R> kind, Journal.Part part, List<RowChange> rows, boolean untouched)
+            throws SQLException, CoilbookException {
         Versions<R> versions = new Versions<>(codecs.of(kind));
         Map<String, Versions.Version<R>> before = new HashMap<>();
         for (Versions.Version<R> version : versions.closed(connection, part)) {
@@ -111,7 +113,9 @@ final class Undo {
 
     private CoilbookException touched(Kind<?> kind, String key, long by) {
         JournalEntry later = journal.entry(connection, by);
-        return new CoilbookException(Reason.BAD_INPUT, "Change " + seq + " cannot be undone: change " + by + " (" + later.why() + ", by " + later.who() + " on "
-                + later.when().atOffset(ZoneOffset.UTC).toLocalDate() + ") touched " + kind.sheet() + " " + key + " later. Undo that one first.");
+        return new CoilbookException(Reason.BAD_INPUT,
+                "Change " + seq + " cannot be undone: change " + by + " (" + later.why() + ", by " + later.who() + " on "
+                        + later.when().atOffset(ZoneOffset.UTC).toLocalDate() + ") touched " + kind.sheet() + " " + key
+                        + " later. Undo that one first.");
     }
 }

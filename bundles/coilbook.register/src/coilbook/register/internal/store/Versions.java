@@ -45,12 +45,14 @@ public final class Versions<R extends Row> {
     }
 
     /** Hands over each version that meets the condition while the query still runs. */
-    public void each(Connection connection, Condition condition, List<? extends OrderField<?>> order, Consumer<Version<R>> consumer) throws SQLException {
+    public void each(Connection connection, Condition condition, List<? extends OrderField<?>> order, Consumer<Version<R>> consumer)
+            throws SQLException {
         each(Database.dsl(connection).select(table.fields()).from(table.table()).where(condition).orderBy(order), consumer);
     }
 
     /** The same for the first so many versions. */
-    public void each(Connection connection, Condition condition, List<? extends OrderField<?>> order, int max, Consumer<Version<R>> consumer)
+    public void each(Connection connection, Condition condition, List<? extends OrderField<?>> order, int max,
+            Consumer<Version<R>> consumer)
             throws SQLException {
         each(Database.dsl(connection).select(table.fields()).from(table.table()).where(condition).orderBy(order).limit(max), consumer);
     }
@@ -60,18 +62,21 @@ public final class Versions<R extends Row> {
             ResultSet line = cursor.resultSet();
             while (line.next()) {
                 long to = line.getLong(5);
-                consumer.accept(new Version<>(line.getLong(1), line.getLong(2), line.getString(3), line.getLong(4), to, codec.read(line, 6)));
+                consumer.accept(
+                        new Version<>(line.getLong(1), line.getLong(2), line.getString(3), line.getLong(4), to, codec.read(line, 6)));
             }
         }
     }
 
     /** The versions whose lookup column holds one of the texts, in lists of a size that the database takes well. */
-    public void lookedUp(Connection connection, Collection<String> lookups, Condition condition, Consumer<Version<R>> consumer) throws SQLException {
+    public void lookedUp(Connection connection, Collection<String> lookups, Condition condition, Consumer<Version<R>> consumer)
+            throws SQLException {
         anyOf(connection, table.lookup(), lookups, condition, consumer);
     }
 
     /** The versions whose text column holds one of the texts. */
-    public void anyOf(Connection connection, org.jooq.Field<String> column, Collection<String> texts, Condition condition, Consumer<Version<R>> consumer)
+    public void anyOf(Connection connection, org.jooq.Field<String> column, Collection<String> texts, Condition condition,
+            Consumer<Version<R>> consumer)
             throws SQLException {
         for (List<String> part : parts(texts)) {
             each(connection, column.in(part).and(condition), List.of(), consumer);
@@ -82,7 +87,8 @@ public final class Versions<R extends Row> {
     public List<Version<R>> opened(Connection connection, Journal.Part part) throws SQLException {
         List<Version<R>> found = new ArrayList<>(part.opened());
         if (part.opened() > 0) {
-            each(connection, KindTable.VERSION.between(part.firstVersion(), part.firstVersion() + part.opened() - 1), List.of(KindTable.VERSION),
+            each(connection, KindTable.VERSION.between(part.firstVersion(), part.firstVersion() + part.opened() - 1),
+                    List.of(KindTable.VERSION),
                     found::add);
         }
         return found;
