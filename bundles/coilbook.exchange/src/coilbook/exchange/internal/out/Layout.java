@@ -1,0 +1,35 @@
+package coilbook.exchange.internal.out;
+
+/** How much room text takes, estimated, because measuring fonts costs more than writing the cells and differs between machines. */
+final class Layout {
+
+    private static final float LINE = 13.5f;
+    private static final int MOST_LINES = 12;
+
+    private Layout() {
+    }
+
+    /** The lines that a text takes when it is broken between words. */
+    static int lines(String text, int width) {
+        int lines = 1;
+        int used = 0;
+        for (String word : text.split("(?<=[ \\n])")) {
+            if (used > 0 && used + word.strip().length() > width) {
+                lines++;
+                used = 0;
+            }
+            lines += Math.max(0, word.length() - 1) / Math.max(1, width);
+            used += word.length();
+            if (word.endsWith("\n")) {
+                lines++;
+                used = 0;
+            }
+        }
+        return Math.min(lines, MOST_LINES);
+    }
+
+    /** The height of a row in points. */
+    static float height(int lines) {
+        return LINE * lines + 2;
+    }
+}
