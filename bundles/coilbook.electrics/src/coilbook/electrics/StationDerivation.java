@@ -49,6 +49,9 @@ public final class StationDerivation {
         SteadyResult middle = steadyNominal(nominalState.celsius());
         double heldNominal = middle == null ? Double.NaN : heat(middle.worst().holdRmsCurrent(), nominalState.celsius());
         low.cases(cases);
+        if (Double.isFinite(hotState.celsius()) && circuits.hasInductance()) {
+            cases.put(Corner.HOT, circuits.atDuty(Corner.HOT, hotState.celsius()));
+        }
         high.cases(cases);
         double saturation = hot.saturation();
         return new StationElectrics(low.peak(), low.timeToPullIn(), low.heldAtPullIn(), low.breakEvenInductance(), low.holdMinimum(),
@@ -70,9 +73,6 @@ public final class StationDerivation {
         CircuitCase circuit = circuits.quick(Corner.NOMINAL, nominalWinding);
         circuit.check();
         cases.put(Corner.NOMINAL, circuit);
-        if (Double.isFinite(steadyWinding)) {
-            cases.put(Corner.HOT, circuits.atDuty(Corner.HOT, Math.min(Temperature.HIGHEST, steadyWinding)));
-        }
         return SteadySearch.overPhases(circuit, SteadySearch.PHASES / 2);
     }
 

@@ -10,6 +10,9 @@ package coilbook.electrics.internal;
  */
 final class CoilBusPiece extends Piece {
 
+    /** Panels of one length serve if the circuit's own time scale is not below this share of the mains'. */
+    private static final double STIFF = 0.15;
+
     private final boolean conducting;
     private final double bridgeDrop;
     private final double switchDrop;
@@ -34,6 +37,22 @@ final class CoilBusPiece extends Piece {
     private double busCosine;
     private double currentSine;
     private double currentCosine;
+
+    /** Length of a standard panel, 0 if the circuit is too stiff for panels of one length. */
+    private final double standard;
+    private final double[] evenAt = new double[Walker.LAST + 1];
+    private final double[] oddAt = new double[Walker.LAST + 1];
+    private final double[] sineAt = new double[Walker.LAST + 1];
+    private final double[] cosineAt = new double[Walker.LAST + 1];
+
+    private double even;
+    private double odd;
+    private double panelSine;
+    private double panelCosine;
+    private double panelBusFree;
+    private double panelCurrentFree;
+    private double panelBusRate;
+    private double panelCurrentRate;
 
     private double theta;
     private double busFree;
@@ -75,6 +94,17 @@ final class CoilBusPiece extends Piece {
             currentSine = force * real / inductance;
             currentCosine = -force * imaginary / inductance;
         }
+        double mainsPanel = mainsPanel();
+        double shortest = Math.min(mainsPanel, naturalPanel(0));
+        standard = shortest > STIFF * mainsPanel ? shortest : 0;
+        for (int index = 1; index <= Walker.LAST; index++) {
+            double offset = standard * (index == Walker.LAST ? 1 : Gauss.node(index - 1));
+            propagate(offset);
+            evenAt[index] = even;
+            oddAt[index] = odd;
+            sineAt[index] = Math.sin(omega * offset);
+            cosineAt[index] = Math.cos(omega * offset);
+        }
     }
 
     /** Begins the piece. Angle: that of the mains, rad; closesAt: current at which the plunger moves, or infinity. */
@@ -94,34 +124,38 @@ final class CoilBusPiece extends Piece {
         currentFreeRate = busFree / inductance - delta * currentFree;
     }
 
-    @Override
-    void at(double elapsed) {
-        double even;
-        double odd;
+    /** Sets even and odd: e^(−αt) times cosine and times sine over frequency, or their hyperbolic or limiting likes. */
+    private void propagate(double elapsed) {
+        double angle = beta * elapsed;
         if (swinging) {
             double decay = Math.exp(-alpha * elapsed);
-            even = decay * Math.cos(beta * elapsed);
-            odd = decay * Math.sin(beta * elapsed) / beta;
+            even = decay * Math.cos(angle);
+            odd = decay * Math.sin(angle) / beta;
+        } else if (angle < 1e-3) {
+            double square = angle * angle;
+            double decay = Math.exp(-alpha * elapsed);
+            even = decay * (1 + square * (0.5 + square / 24));
+            odd = decay * elapsed * (1 + square * (1 / 6.0 + square / 120));
         } else {
-            double angle = beta * elapsed;
-            if (angle < 1e-3) {
-                double square = angle * angle;
-                double decay = Math.exp(-alpha * elapsed);
-                even = decay * (1 + square * (0.5 + square / 24));
-                odd = decay * elapsed * (1 + square * (1 / 6.0 + square / 120));
-            } else {
-                double slow = Math.exp(-slowRate * elapsed);
-                double fast = Math.exp(-fastRate * elapsed);
-                even = 0.5 * (slow + fast);
-                odd = 0.5 * (slow - fast) / beta;
-            }
+            double slow = Math.exp(-slowRate * elapsed);
+            double fast = Math.exp(-fastRate * elapsed);
+            even = 0.5 * (slow + fast);
+            odd = 0.5 * (slow - fast) / beta;
         }
+    }
+
+    @Override
+    void at(double elapsed) {
+        propagate(elapsed);
         bus = busConstant + even * busFree + odd * busFreeRate;
         current = currentConstant + even * currentFree + odd * currentFreeRate;
         double angle = theta + omega * elapsed;
-        double sine = Math.sin(angle);
+        finish(Math.sin(angle), conducting ? Math.cos(angle) : 0);
+    }
+
+    /** Adds the forced response and sets what follows from bus and current. */
+    private void finish(double sine, double cosine) {
         if (conducting) {
-            double cosine = Math.cos(angle);
             bus += busSine * sine + busCosine * cosine;
             current += currentSine * sine + currentCosine * cosine;
             mains = mainsPeak * sine;
@@ -132,6 +166,29 @@ final class CoilBusPiece extends Piece {
         }
         rectified = drawn;
         slope = (bus - switchDrop - resistance * current) / inductance;
+    }
+
+    @Override
+    double standardPanel() {
+        return standard;
+    }
+
+    @Override
+    void beginStandard(double elapsed, double startBus, double startCurrent) {
+        double angle = theta + omega * elapsed;
+        panelSine = Math.sin(angle);
+        panelCosine = Math.cos(angle);
+        panelBusFree = startBus - busConstant - busSine * panelSine - busCosine * panelCosine;
+        panelCurrentFree = startCurrent - currentConstant - currentSine * panelSine - currentCosine * panelCosine;
+        panelBusRate = delta * panelBusFree - panelCurrentFree * inverseCapacitance;
+        panelCurrentRate = panelBusFree / inductance - delta * panelCurrentFree;
+    }
+
+    @Override
+    void standardPoint(int index) {
+        bus = busConstant + evenAt[index] * panelBusFree + oddAt[index] * panelBusRate;
+        current = currentConstant + evenAt[index] * panelCurrentFree + oddAt[index] * panelCurrentRate;
+        finish(panelSine * cosineAt[index] + panelCosine * sineAt[index], panelCosine * cosineAt[index] - panelSine * sineAt[index]);
     }
 
     @Override
@@ -164,9 +221,15 @@ final class CoilBusPiece extends Piece {
 
     @Override
     double panel(double elapsed) {
-        double mainsPanel = (conducting ? 2 : 2.5) / omega;
-        double natural = swinging ? Math.min(panelForDecay(alpha, elapsed), alpha * elapsed > 40 ? UNLIMITED : 2 / beta)
+        return standard > 0 ? standard : Math.min(mainsPanel(), naturalPanel(elapsed));
+    }
+
+    private double mainsPanel() {
+        return (conducting ? 2 : 2.5) / omega;
+    }
+
+    private double naturalPanel(double elapsed) {
+        return swinging ? Math.min(panelForDecay(alpha, elapsed), alpha * elapsed > 40 ? UNLIMITED : 2 / beta)
                 : Math.min(panelForDecay(fastRate, elapsed), panelForDecay(slowRate, elapsed));
-        return Math.min(mainsPanel, natural);
     }
 }

@@ -53,6 +53,16 @@ abstract class CycleMachine {
         rest(phase);
     }
 
+    /** Puts the circuit into a state before a switch-on: source voltage, V, coil current, A, plunger, and phase of the mains, rad. */
+    final void resume(double source, double coilCurrent, boolean closed, double phase) {
+        restart(phase);
+        current = coilCurrent;
+        if (closed) {
+            plunger.close(0);
+        }
+        setSource(source);
+    }
+
     /** Runs one cycle from switch-on to the next switch-on. */
     final void cycle() throws IllegalCaseException {
         totals.clear();
@@ -68,6 +78,15 @@ abstract class CycleMachine {
 
     /** Source to its state at rest. */
     abstract void rest(double phase);
+
+    /** Sets the source's own state, V. */
+    abstract void setSource(double voltage);
+
+    /** The source's own state, V. */
+    abstract double source();
+
+    /** Effort of the last cycle, in panels. */
+    abstract long work();
 
     /** Notes the source at switch-on. */
     abstract void begin();
@@ -151,9 +170,11 @@ abstract class CycleMachine {
                 seriesResistance() * drawn, rectifierDrop() * totals.get(Totals.RECTIFIER), switchDrop * totals.get(Totals.SWITCH),
                 clampVoltage * totals.get(Totals.CLAMP), bleed, plunger.work(), stored() - storedBefore);
         double holdLength = onTime - holdStart;
-        return new CycleResult(number, sourceAtSwitchOn, sourcePeak, observer.peak, observer.timeOfPeak, observer.timeToPullIn,
-                observer.heldAtPullIn(), totals.get(Totals.HOLD_CURRENT) / holdLength, observer.holdMinimum,
-                Math.sqrt(totals.get(Totals.HOLD_SQUARE) / holdLength), observer.minimumAfterPeak, observer.minimumAfterOpening(),
+        return new CycleResult(number, sourceAtSwitchOn, sourcePeak, Math.max(0, observer.peak), observer.timeOfPeak, observer.timeToPullIn,
+                observer.heldAtPullIn(), Math.max(0, totals.get(Totals.HOLD_CURRENT) / holdLength),
+                Math.max(0, observer.holdMinimum),
+                Math.sqrt(totals.get(Totals.HOLD_SQUARE) / holdLength), Math.max(0, observer.minimumAfterPeak),
+                Math.max(0, observer.minimumAfterOpening()),
                 observer.longestBelowDropOut(), currentAtSwitchOff, releaseTime, current, winding * square, Math.sqrt(square / period),
                 Math.sqrt(drawn / period), drawnPeak(), energies);
     }

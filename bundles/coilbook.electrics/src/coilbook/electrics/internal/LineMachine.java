@@ -62,6 +62,21 @@ final class LineMachine extends CycleMachine {
     }
 
     @Override
+    void setSource(double voltage) {
+        bus = voltage;
+    }
+
+    @Override
+    double source() {
+        return bus;
+    }
+
+    @Override
+    long work() {
+        return walker.work();
+    }
+
+    @Override
     void begin() {
         sourceAtSwitchOn = bus;
         walker.clear();

@@ -30,6 +30,21 @@ abstract class Piece {
     /** Longest step over which eight Gauss points integrate squares to better than 1e-10, from a time since the piece began. */
     abstract double panel(double elapsed);
 
+    /** Length of the panels whose points can be had by {@link #standardPoint}; 0 if there are none. */
+    double standardPanel() {
+        return 0;
+    }
+
+    /** Begins a panel of standard length from the state at its start. */
+    void beginStandard(double elapsed, double startBus, double startCurrent) {
+        throw new IllegalStateException("no standard panel");
+    }
+
+    /** Sets the fields for a point of the standard panel: 1 to 8 the Gauss points, 9 the end. */
+    void standardPoint(int index) {
+        throw new IllegalStateException("no standard panel");
+    }
+
     /** Panel length that follows a decay of the given rate: short at first, wider as it dies away. */
     static double panelForDecay(double rate, double elapsed) {
         double decayed = rate * elapsed;

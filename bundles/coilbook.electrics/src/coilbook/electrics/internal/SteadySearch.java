@@ -9,8 +9,9 @@ import java.util.ArrayList;
 import java.util.List;
 
 /**
- * Finds the cycle that repeats the one before within 0.1 %. Where the mains phase drifts from cycle to cycle, the cycle that settles at each of a
- * number of phases is found by starting further and further back along the drift, until the start no longer matters.
+ * Finds the cycle that repeats the one before within 0.1 %. Where the mains phase drifts from cycle to cycle, the settled cycle is a function of
+ * the phase at its switch-on: it is found at evenly spaced phases together, each pass starting every phase from the state in which the cycle
+ * before it ended, interpolated between the phases, until nothing changes any more.
  */
 public final class SteadySearch {
 
@@ -19,6 +20,9 @@ public final class SteadySearch {
 
     private static final double SAME = 1e-3;
     private static final int MOST_CYCLES = 4096;
+    /** Panels after which the search gives up: a second or two. */
+    private static final long MOST_EFFORT = 2_000_000;
+    private static final int WARM_UP = 2;
 
     private final CircuitCase circuit;
     private final CycleMachine machine;
@@ -54,7 +58,9 @@ public final class SteadySearch {
         int count = Machines.feelsMains(circuit) ? phases : 1;
         List<CycleResult> byPhase = new ArrayList<>(count);
         for (int index = 0; index < count; index++) {
-            byPhase.add(search.after(0, Math.PI * index / count, 0));
+            search.machine.restart(Math.PI * index / count);
+            search.machine.cycle();
+            byPhase.add(search.machine.result(1));
         }
         search.slowest = 1;
         return search.result(byPhase);
@@ -65,66 +71,97 @@ public final class SteadySearch {
     }
 
     private SteadyResult overPhases(int phases) throws IllegalCaseException {
-        List<CycleResult> byPhase = new ArrayList<>(phases);
-        double step = Machines.phaseStep(circuit);
-        int lead = 1;
-        for (int index = 0; index < phases; index++) {
-            double phase = Math.PI * index / phases;
-            CycleResult last = after(lead, phase, step);
-            CycleResult next = after(lead + 1, phase, step);
-            while (!agree(last, next) && lead < MOST_CYCLES) {
-                last = next;
-                lead = 2 * lead;
-                next = after(lead + 1, phase, step);
-            }
-            settled = agree(last, next) && settled;
-            slowest = Math.max(slowest, lead + 1);
-            byPhase.add(next);
-        }
-        return result(byPhase);
-    }
-
-    /** The cycle that follows the given number of others and is switched on at the given phase. */
-    private CycleResult after(int others, double phase, double step) throws IllegalCaseException {
-        machine.restart(phase - others * step);
-        for (int index = 0; index <= others; index++) {
+        machine.restart(0);
+        for (int cycle = 0; cycle < WARM_UP; cycle++) {
             machine.cycle();
         }
-        return machine.result(others + 1);
+        PhaseStates states = new PhaseStates(phases, machine.source(), machine.current, machine.plunger.isClosed());
+        double step = Machines.phaseStep(circuit);
+        List<CycleResult> last = pass(states);
+        long effort = machine.work();
+        for (int pass = 1; pass <= MOST_CYCLES; pass++) {
+            double moved = states.shift(step);
+            List<CycleResult> next = pass(states);
+            effort += phases * machine.work();
+            slowest = WARM_UP + pass + 1;
+            double moves = states.movesNext(step);
+            // what further passes could still change is what this one will hand on, as a share of what it was handed itself
+            double share = moved > 0 ? moves / moved : 0;
+            if (share < 1 && agree(last, next, share) || states.settled(moves)) {
+                return result(next);
+            }
+            if (effort > MOST_EFFORT) {
+                break;
+            }
+            last = next;
+        }
+        settled = false;
+        return result(last);
+    }
+
+    /** Runs one cycle at every phase and keeps the states in which they end. */
+    private List<CycleResult> pass(PhaseStates states) throws IllegalCaseException {
+        int phases = states.count();
+        List<CycleResult> byPhase = new ArrayList<>(phases);
+        for (int index = 0; index < phases; index++) {
+            machine.resume(states.source(index), states.current(index), states.closed(index), Math.PI * index / phases);
+            machine.cycle();
+            states.end(index, machine.source(), machine.current, machine.plunger.isClosed());
+            byPhase.add(machine.result(slowest + 1));
+        }
+        return byPhase;
     }
 
     private CycleResult forward(double phase) throws IllegalCaseException {
         machine.restart(phase);
         machine.cycle();
         CycleResult last = machine.result(1);
+        long effort = 0;
         for (int cycle = 2; cycle <= MOST_CYCLES; cycle++) {
             machine.cycle();
             CycleResult next = machine.result(cycle);
             slowest = cycle;
-            if (agree(last, next)) {
+            if (agree(last, next, 1)) {
                 return next;
             }
             last = next;
+            effort += machine.work();
+            if (effort > MOST_EFFORT) {
+                break;
+            }
         }
         settled = false;
         return last;
     }
 
-    private static boolean agree(CycleResult one, CycleResult other) {
-        double scale = 1e-6 * Math.max(one.peakCurrent(), other.peakCurrent());
-        double shortTime = 1e-6 * Math.max(one.timeOfPeak(), other.timeOfPeak());
-        return same(one.sourceVoltageAtSwitchOn(), other.sourceVoltageAtSwitchOn(), 0) && same(one.peakCurrent(), other.peakCurrent(), 0)
-                && same(one.timeOfPeak(), other.timeOfPeak(), shortTime) && same(one.timeToPullIn(), other.timeToPullIn(), shortTime)
-                && same(one.holdMeanCurrent(), other.holdMeanCurrent(), scale)
-                && same(one.holdMinimumCurrent(), other.holdMinimumCurrent(), scale)
-                && same(one.minimumAfterPeakCurrent(), other.minimumAfterPeakCurrent(), scale)
-                && same(one.windingEnergy(), other.windingEnergy(), 0) && same(one.releaseTime(), other.releaseTime(), shortTime)
-                && same(one.residualCurrent(), other.residualCurrent(), SAME * Math.max(one.peakCurrent(), other.peakCurrent()));
+    private static boolean agree(List<CycleResult> ones, List<CycleResult> others, double share) {
+        for (int index = 0; index < ones.size(); index++) {
+            if (!agree(ones.get(index), others.get(index), share)) {
+                return false;
+            }
+        }
+        return true;
     }
 
-    private static boolean same(double one, double other, double slack) {
+    /** True if the two are within 0.1 % of each other, or if the given share of their difference is. */
+    private static boolean agree(CycleResult one, CycleResult other, double share) {
+        double peak = Math.max(one.peakCurrent(), other.peakCurrent());
+        double scale = 1e-6 * peak;
+        double shortTime = 1e-6 * Math.max(one.timeOfPeak(), other.timeOfPeak());
+        return same(one.sourceVoltageAtSwitchOn(), other.sourceVoltageAtSwitchOn(), 0, share)
+                && same(one.peakCurrent(), other.peakCurrent(), 0, share) && same(one.timeOfPeak(), other.timeOfPeak(), shortTime, share)
+                && same(one.timeToPullIn(), other.timeToPullIn(), shortTime, share)
+                && same(one.holdMeanCurrent(), other.holdMeanCurrent(), scale, share)
+                && same(one.holdMinimumCurrent(), other.holdMinimumCurrent(), scale, share)
+                && same(one.minimumAfterPeakCurrent(), other.minimumAfterPeakCurrent(), scale, share)
+                && same(one.windingEnergy(), other.windingEnergy(), 0, share)
+                && same(one.releaseTime(), other.releaseTime(), shortTime, share)
+                && same(one.residualCurrent(), other.residualCurrent(), SAME * peak, share);
+    }
+
+    private static boolean same(double one, double other, double slack, double share) {
         return one == other || Double.isNaN(one) && Double.isNaN(other)
-                || Math.abs(one - other) <= SAME * Math.max(Math.abs(one), Math.abs(other)) + slack;
+                || share * Math.abs(one - other) <= SAME * Math.max(Math.abs(one), Math.abs(other)) + slack;
     }
 
     private static CycleResult worst(List<CycleResult> all, int cycle) {

@@ -8,9 +8,9 @@ import coilbook.electrics.IllegalCaseException;
  */
 final class Walker {
 
-    private static final int LAST = Gauss.POINTS + 1;
+    static final int LAST = Gauss.POINTS + 1;
     /** Panels allowed in one cycle: beyond that a circuit swings so fast and so long that it is no driver and coil. */
-    private static final long WORK_LIMIT = 20_000_000;
+    private static final long WORK_LIMIT = 3_000_000;
 
     private final double[] time = new double[LAST + 1];
     private final double[] current = new double[LAST + 1];
@@ -65,7 +65,11 @@ final class Walker {
             if (length - a - panel < 1e-3 * panel) {
                 panel = length - a;
             }
-            fill(piece, a, panel);
+            if (panel == piece.standardPanel()) {
+                fillStandard(piece, a, panel);
+            } else {
+                fill(piece, a, panel);
+            }
             int late = firstLate(piece, blind);
             if (late > 0) {
                 double end = Roots.marginEnds(piece, time[late - 1], time[late]);
@@ -89,10 +93,29 @@ final class Walker {
         return length;
     }
 
-    private void fill(Piece piece, double a, double panel) throws IllegalCaseException {
+    /** Panels walked since last cleared. */
+    long work() {
+        return work;
+    }
+
+    private void count() throws IllegalCaseException {
         if (++work > WORK_LIMIT) {
             throw new IllegalCaseException("circuit", "a circuit that swings too fast for its duty", "slower swings or a shorter cycle");
         }
+    }
+
+    /** A panel of the piece's own standard length: its points follow from the first without exponentials. */
+    private void fillStandard(Piece piece, double a, double panel) throws IllegalCaseException {
+        count();
+        piece.beginStandard(a, bus[0], current[0]);
+        for (int index = 1; index <= LAST; index++) {
+            piece.standardPoint(index);
+            record(piece, index, a + node[index] * panel);
+        }
+    }
+
+    private void fill(Piece piece, double a, double panel) throws IllegalCaseException {
+        count();
         for (int index = 1; index <= LAST; index++) {
             double at = a + node[index] * panel;
             piece.at(at);
