@@ -57,7 +57,7 @@ class StationDerivationTest {
     /** The steady temperature balances: heat per cycle at that temperature times rate times thermal resistance is the rise. */
     @Test
     void windingTemperatureBalances() throws IllegalCaseException {
-        for (StationCircuit station : List.of(twoLevel(coil(8e-3, 3.2, 4)), lineCapacitor(mainsCoil(0.6), 5))) {
+        for (StationCircuit station : List.of(twoLevel(coil(8e-3, 3.2, 4)), lineCapacitor(mainsCoil(0.6), 5.3))) {
             StationElectrics electrics = StationDerivation.derive(station);
             double celsius = electrics.windingTemperature().value();
             assertEquals(60 + 4 * electrics.averagePower().value(), celsius, 0.01);
