@@ -5,6 +5,7 @@ import coilbook.criteria.internal.station.StationData;
 import coilbook.electrics.Copper;
 import coilbook.electrics.Data;
 import coilbook.fleet.Datum;
+import coilbook.fleet.DriverKind;
 import coilbook.fleet.DriverType;
 import coilbook.fleet.StationView;
 
@@ -31,6 +32,6 @@ final class DirectCurrent {
             case RECTIFIED_AC, DIRECT_AC -> data.fact(Data.DRIVER_KIND);
         };
         Fact current = voltage.map(v -> v - Datum.or(driver.switchDrop(), 0)).with(resistance, (v, r) -> v / r);
-        return driver.peakCurrent() == null ? current : current.with(data.fact(Data.PEAK_CURRENT), Math::min);
+        return driver.kind() == DriverKind.CURRENT_REGULATED ? current.with(data.fact(Data.PEAK_CURRENT), Math::min) : current;
     }
 }

@@ -64,7 +64,8 @@ public final class HoldCurrent extends ElectricCriterion {
         missing.addAll(data.missing(mean));
         missing.addAll(dropOut.missing());
         if (!missing.isEmpty()) {
-            return judgement.undetermined(missing);
+            Fact ratio = Comparison.ratio(station, data);
+            return ratio.isKnown() ? Comparison.judge(ratio, station, judgement, "hold current") : judgement.undetermined(missing);
         }
         boolean lineOperated = station.driver().kind() == DriverKind.LINE_CAPACITOR;
         if (lineOperated) {

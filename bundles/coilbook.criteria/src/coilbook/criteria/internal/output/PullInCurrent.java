@@ -119,6 +119,10 @@ public final class PullInCurrent extends ElectricCriterion {
                                     + data.channel().words() + "; pull-in needs " + Shown.beside(pullIn.value(), most.value(), Unit.AMPERE)
                                     + source(pullIn.provenance()));
         }
+        Fact ratio = Comparison.ratio(station, data);
+        if (ratio.isKnown()) {
+            return Comparison.judge(ratio, station, judgement, "peak current");
+        }
         Derived breakEven = electrics.breakEvenInductance();
         if (pullIn.isKnown() && breakEven.known() && !Double.isInfinite(breakEven.value()) && breakEven.value() > 0
                 && peak.missing().equals(List.of(Data.INDUCTANCE))) {
