@@ -31,7 +31,7 @@ public final class CoilInsulation extends DescribedCriterion {
                         + " peak is common practice, no source",
                 "Yes: the frame can become live",
                 "not isolated: V_high ≤ rms rating and √2 · V_high + clamp voltage ≤ peak rating; isolated: output voltage ≤ rms rating and output"
-                        + " voltage + clamp voltage ≤ peak rating; observation where V_nominal · (1 + √2) > rms rating",
+                        + " voltage + clamp voltage ≤ peak rating; observation where V_nominal + √2 · V_nominal − rectifier drop > rms rating",
                 List.of("another coil", "an isolated driver", "a transformer")));
     }
 

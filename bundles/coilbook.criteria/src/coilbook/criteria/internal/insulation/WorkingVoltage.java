@@ -3,6 +3,7 @@ package coilbook.criteria.internal.insulation;
 import coilbook.criteria.internal.station.Fact;
 import coilbook.criteria.internal.station.InputVoltage;
 import coilbook.criteria.internal.station.Names;
+import coilbook.fleet.Datum;
 import coilbook.fleet.DriverKind;
 import coilbook.fleet.DriverType;
 import coilbook.fleet.StationView;
@@ -29,7 +30,8 @@ public record WorkingVoltage(Fact rms, Fact peak, Fact customarySum, boolean mai
         InputVoltage input = InputVoltage.of(view);
         Fact clamp = clamp(view);
         Fact peak = input.high().map(v -> v * Math.sqrt(2)).with(clamp, Double::sum);
-        Fact sum = input.nominal().map(v -> v * (1 + Math.sqrt(2)));
+        double drop = Datum.or(view.driver().rectifierDrop(), 0);
+        Fact sum = input.nominal().map(v -> v + Math.sqrt(2) * v - drop);
         return new WorkingVoltage(input.high(), peak, sum, true);
     }
 

@@ -56,10 +56,10 @@ class CoilInsulationTest {
 
     @Test
     void customarySumIsAnObservationAtNominalMains() {
-        // 120 · (1 + √2) = 289.7056 V (common practice, no source).
+        // 120 + √2 · 120 − 1.4 = 288.3056 V (common practice, no source).
         judge(lineCapacitorStation().coil("insulation_voltage", Datum.catalogue(250))).is(Verdict.OBSERVATION).at("nominal")
-                .compares(289.70562748, 250, 1e-9).says("289.7 V", "common practice, no source");
-        judge(lineCapacitorStation().coil("insulation_voltage", Datum.catalogue(289.70562748477142))).is(Verdict.CONFORMITY);
+                .compares(288.30562748, 250, 1e-9).says("288.3 V", "common practice, no source");
+        judge(lineCapacitorStation().coil("insulation_voltage", Datum.catalogue(288.30562748477142))).is(Verdict.CONFORMITY);
     }
 
     @Test
