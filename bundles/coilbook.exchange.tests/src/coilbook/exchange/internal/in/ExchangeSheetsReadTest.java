@@ -20,6 +20,7 @@ import java.time.LocalDate;
 import java.time.LocalDateTime;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Set;
 
@@ -67,7 +68,7 @@ class ExchangeSheetsReadTest {
         for (Kind<?> kind : ExchangeSheets.KINDS) {
             Set<String> seen = new HashSet<>();
             ExchangeSheets.columns(kind)
-                    .forEach(column -> assertTrue(seen.add(Texts.fold(column.heading())), kind + ": " + column.heading()));
+                    .forEach(column -> assertTrue(seen.add(column.heading().toLowerCase(Locale.ROOT)), kind + ": " + column.heading()));
         }
     }
 

@@ -32,6 +32,7 @@ import coilbook.fleet.CoilKind;
 import coilbook.fleet.CoilType;
 import coilbook.fleet.Connection;
 import coilbook.fleet.Customer;
+import coilbook.fleet.DriverKind;
 import coilbook.fleet.DriverType;
 import coilbook.fleet.Duty;
 import coilbook.fleet.FittedKind;
@@ -372,10 +373,10 @@ class FlatListTest {
     }
 
     @Test
-    void everyHeadingOfTheTableHasOneMeaning() {
-        FlatLayout layout = new FlatLayout();
-        assertTrue(layout.names().size() > 300, "headings known: " + layout.names().size());
-        assertEquals("driver_type.kind", layout.find(Texts.fold("Driver kind")).target().id());
-        assertEquals(DriverType.class, layout.find(Texts.fold("Driver kind")).target().kind().type());
+    void whatALineSaysOfATypeIsKept() throws Exception {
+        Incoming incoming = read(
+                text(folder, "list.csv", "Site,Line,Station,Driver,Driver kind,Driver maker", "S,L,1,D1,fixed-dc,Invented"));
+        assertEquals(DriverKind.FIXED_DC, only(incoming, DriverType.class, "kind"));
+        assertEquals("Invented", only(incoming, DriverType.class, "maker"));
     }
 }
