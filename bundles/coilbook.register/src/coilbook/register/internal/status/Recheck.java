@@ -24,6 +24,7 @@ import coilbook.fleet.CoilbookException.Reason;
 import coilbook.fleet.Progress;
 import coilbook.register.internal.read.LoadedStation;
 import coilbook.register.internal.store.Database;
+import coilbook.register.internal.store.Sought;
 
 /**
  * Judges batches of stations on all cores while the next batch is read, and writes what is new. One object serves one run.
@@ -106,13 +107,11 @@ final class Recheck implements AutoCloseable {
     private Map<Long, Known> known(List<LoadedStation> batch) throws SQLException {
         Map<Long, Known> known = new HashMap<>();
         try (Connection connection = view.connection()) {
-            List<Long> ids = batch.stream().map(LoadedStation::id).toList();
-            for (int i = 0; i < ids.size(); i += 500) {
-                for (Record4<Long, String, LocalDate, LocalDate> line : Database.dsl(connection)
-                        .select(ViewTables.ID, ViewTables.FINGERPRINT, ViewTables.JUDGED_ON, ViewTables.RECHECK_ON).from(ViewTables.STATUS)
-                        .where(ViewTables.ID.in(ids.subList(i, Math.min(ids.size(), i + 500)))).fetch()) {
-                    known.put(line.value1(), new Known(line.value2(), line.value3(), line.value4()));
-                }
+            long[] ids = batch.stream().mapToLong(LoadedStation::id).toArray();
+            for (Record4<Long, String, LocalDate, LocalDate> line : Database.dsl(connection)
+                    .select(ViewTables.ID, ViewTables.FINGERPRINT, ViewTables.JUDGED_ON, ViewTables.RECHECK_ON).from(Sought.numbers(ids))
+                    .join(ViewTables.STATUS).on(ViewTables.ID.eq(Sought.NUMBER)).fetch()) {
+                known.put(line.value1(), new Known(line.value2(), line.value3(), line.value4()));
             }
         }
         return known;

@@ -27,6 +27,7 @@ import coilbook.register.StatusColumn;
 import coilbook.register.StatusQuery;
 import coilbook.register.StatusRow;
 import coilbook.register.internal.store.Database;
+import coilbook.register.internal.store.Sought;
 
 /** Reads status rows and findings. */
 final class StatusReader {
@@ -78,9 +79,9 @@ final class StatusReader {
         fields.addAll(ViewTables.shown());
         try (Connection connection = database.connection()) {
             for (int start = 0; start < ids.length; start += WINDOW) {
-                List<Long> window = Arrays.stream(ids, start, Math.min(ids.length, start + WINDOW)).boxed().toList();
-                try (Cursor<Record> cursor = Database.dsl(connection).select(fields).from(ViewTables.STATUS).where(ViewTables.ID.in(window))
-                        .fetchLazy()) {
+                long[] window = Arrays.copyOfRange(ids, start, Math.min(ids.length, start + WINDOW));
+                try (Cursor<Record> cursor = Database.dsl(connection).select(fields).from(Sought.numbers(window)).join(ViewTables.STATUS)
+                        .on(ViewTables.ID.eq(Sought.NUMBER)).fetchLazy()) {
                     ResultSet line = cursor.resultSet();
                     while (line.next()) {
                         rows[places.get(line.getLong(1))] = row(line);

@@ -33,6 +33,9 @@ import coilbook.fleet.ValveType;
 /** What rows refer to, and that no Change leaves a reference that leads nowhere. */
 public final class References {
 
+    /** Up to so many stations it is quicker to look each up than to read everything that may refer to one. */
+    private static final int FEW = 5000;
+
     private final Codecs codecs;
 
     References(Codecs codecs) {
@@ -170,11 +173,9 @@ public final class References {
         Set<String> lookups = new HashSet<>();
         keys.forEach(key -> lookups.add(table.lookupOf(key)));
         Set<String> found = new HashSet<>();
-        for (List<String> part : Versions.parts(lookups)) {
-            found.addAll(Database.dsl(connection).select(KindTable.KEY).from(table.table())
-                    .where(table.lookup().in(part).and(KindTable.knownAt(head)))
-                    .fetch(KindTable.KEY));
-        }
+        found.addAll(Database.dsl(connection).select(KindTable.KEY).from(Sought.texts(lookups)).join(table.table())
+                .on(table.lookup().eq(Sought.TEXT))
+                .where(KindTable.knownAt(head)).fetch(KindTable.KEY));
         return found;
     }
 
@@ -210,8 +211,7 @@ public final class References {
         Versions<R> versions = new Versions<>(codecs.of(kind));
         List<Row> dangling = new ArrayList<>();
         Set<String> stations = gone.getOrDefault(Kind.of(Station.class), Set.of());
-        boolean byStation = gone.size() == 1 && !stations.isEmpty() && stations.size() <= 10 * Versions.LIST
-                && table.lookup() != KindTable.KEY;
+        boolean byStation = gone.size() == 1 && !stations.isEmpty() && stations.size() <= FEW && table.lookup() != KindTable.KEY;
         java.util.function.Consumer<Versions.Version<R>> look = version -> {
             if (dangling.isEmpty()) {
                 for (Reference reference : of(version.row())) {

@@ -12,7 +12,9 @@ import org.jooq.Condition;
 import org.jooq.Cursor;
 import org.jooq.OrderField;
 import org.jooq.Record;
+import org.jooq.Record1;
 import org.jooq.ResultQuery;
+import org.jooq.Table;
 import org.jooq.impl.DSL;
 
 import coilbook.fleet.Row;
@@ -23,9 +25,6 @@ import coilbook.fleet.Row;
  * @param <R> the record
  */
 public final class Versions<R extends Row> {
-
-    /** How many values one list in a statement holds. */
-    static final int LIST = 500;
 
     private final RowCodec<R> codec;
     private final KindTable<R> table;
@@ -57,8 +56,8 @@ public final class Versions<R extends Row> {
         each(Database.dsl(connection).select(table.fields()).from(table.table()).where(condition).orderBy(order).limit(max), consumer);
     }
 
-    private void each(ResultQuery<Record> query, Consumer<Version<R>> consumer) throws SQLException {
-        try (Cursor<Record> cursor = query.fetchLazy()) {
+    private void each(ResultQuery<? extends Record> query, Consumer<Version<R>> consumer) throws SQLException {
+        try (Cursor<? extends Record> cursor = query.fetchLazy()) {
             ResultSet line = cursor.resultSet();
             while (line.next()) {
                 long to = line.getLong(5);
@@ -68,7 +67,7 @@ public final class Versions<R extends Row> {
         }
     }
 
-    /** The versions whose lookup column holds one of the texts, in lists of a size that the database takes well. */
+    /** The versions whose lookup column holds one of the texts. */
     public void lookedUp(Connection connection, Collection<String> lookups, Condition condition, Consumer<Version<R>> consumer)
             throws SQLException {
         anyOf(connection, table.lookup(), lookups, condition, consumer);
@@ -78,8 +77,10 @@ public final class Versions<R extends Row> {
     public void anyOf(Connection connection, org.jooq.Field<String> column, Collection<String> texts, Condition condition,
             Consumer<Version<R>> consumer)
             throws SQLException {
-        for (List<String> part : parts(texts)) {
-            each(connection, column.in(part).and(condition), List.of(), consumer);
+        if (!texts.isEmpty()) {
+            Table<Record1<String>> sought = Sought.texts(texts);
+            each(Database.dsl(connection).select(table.fields()).from(sought).join(table.table()).on(column.eq(Sought.TEXT))
+                    .where(condition), consumer);
         }
     }
 
@@ -107,14 +108,5 @@ public final class Versions<R extends Row> {
     long nextVersion(Connection connection) {
         Long last = Database.dsl(connection).select(DSL.max(KindTable.VERSION)).from(table.table()).fetchOne(0, Long.class);
         return last == null ? 1 : last + 1;
-    }
-
-    static <T> List<List<T>> parts(Collection<T> all) {
-        List<T> list = List.copyOf(all);
-        List<List<T>> parts = new ArrayList<>();
-        for (int i = 0; i < list.size(); i += LIST) {
-            parts.add(list.subList(i, Math.min(list.size(), i + LIST)));
-        }
-        return parts;
     }
 }
