@@ -37,7 +37,7 @@ public record StationDuty(Fact meanRate, Fact burstRate, Fact onTime, Fact offTi
             burst = burst.orElse(speed.with(length.with(gap, Double::sum), (v, l) -> v / l));
             rate = rate.orElse(speed.with(pitch, (v, p) -> v / p)).orElse(burst);
         }
-        burst = burst.orElse(rate);
+        burst = burst.isKnown() ? burst : rate;
         onTime = fitting(view, fitting(view, onTime, burst), rate);
         Fact rest = burst.with(onTime, (f, t) -> 1 / f - t);
         return new StationDuty(rate, burst, onTime, gapTime.orElse(rest));

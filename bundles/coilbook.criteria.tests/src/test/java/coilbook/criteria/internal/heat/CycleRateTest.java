@@ -90,7 +90,7 @@ class CycleRateTest {
 
     @Test
     void namesWhatIsNotThere() {
-        judge(twoLevelStation().duty("cycle_rate", null)).is(Verdict.UNDETERMINED).says("Cycle rate of station WERK/L1/=A1");
+        judge(twoLevelStation().duty("cycle_rate", null)).is(Verdict.UNDETERMINED).misses("Cycle rate of station WERK/L1/=A1");
         judge(twoLevelStation().duty("on_time", null)).is(Verdict.UNDETERMINED).misses("On-time of station WERK/L1/=A1");
         judge(twoLevelStation().withoutValve()).is(Verdict.UNDETERMINED).misses("Valve type of station WERK/L1/=A1");
         judge(twoLevelStation().coil("thermal_resistance", null).coil("highest_dissipation", null)).is(Verdict.UNDETERMINED)
