@@ -88,7 +88,7 @@ public final class AuditWriter implements AuditWorkbook {
         }
 
         void audit() throws CoilbookException {
-            if (past) {
+            if (past && !register.status().isUpToDate(asOf)) {
                 try (PastStatus then = register.statusAsOf(AsOf.on(asOf), scope, progress)) {
                     audit(then);
                 }
