@@ -61,7 +61,8 @@ class RoundTripTest {
         new AuditWriter(TODAY).write(new FixtureRegister(fleet), FleetScope.sites(List.of("=BIR")), FleetFixture.DAY, file, Progress.NONE);
         assertTrue(read(file).partial());
         Path past = folder.resolve("past.xlsx");
-        new AuditWriter(Clock.offset(TODAY, java.time.Duration.ofDays(3))).write(new FixtureRegister(fleet), FleetScope.all(), FleetFixture.DAY, past,
+        new AuditWriter(Clock.offset(TODAY, java.time.Duration.ofDays(3))).write(new FixtureRegister(fleet), FleetScope.all(),
+                FleetFixture.DAY, past,
                 Progress.NONE);
         assertTrue(read(past).pastDate());
     }
