@@ -14,6 +14,7 @@ import coilbook.electrics.StationCircuit;
 import coilbook.electrics.SupplyRange;
 import coilbook.fleet.CoilType;
 import coilbook.fleet.Datum;
+import coilbook.fleet.DriverKind;
 import coilbook.fleet.DriverType;
 import coilbook.fleet.FittedKind;
 import coilbook.fleet.FleetSettings;
@@ -136,7 +137,19 @@ public final class StationData {
     public Provenance weakestOfCurrent() {
         Provenance driver = facts.entrySet().stream().filter(e -> e.getKey().startsWith("driver.")).map(e -> e.getValue().provenance())
                 .reduce(null, Provenance::weaker);
-        return Provenance.weaker(Provenance.weaker(driver, cable.provenance()), weakest(Data.COIL_RESISTANCE, Data.INDUCTANCE));
+        Provenance stated = Provenance.weaker(Provenance.weaker(driver, cable.provenance()),
+                weakest(Data.COIL_RESISTANCE, Data.INDUCTANCE));
+        return restsOnDefaults() ? Provenance.ASSUMED : stated;
+    }
+
+    /** Whether a drop or tolerance that decides the current had to be taken by rule, since the driver type does not state it. */
+    private boolean restsOnDefaults() {
+        DriverType type = view.driver();
+        if (type == null || type.kind() == null) {
+            return false;
+        }
+        return type.switchDrop() == null || type.kind() == DriverKind.LINE_CAPACITOR
+                && (type.rectifierDrop() == null || type.seriesResistanceTolerance() == null || type.capacitanceTolerance() == null);
     }
 
     private StationCircuit circuit(Fact highestAmbient) {
@@ -216,7 +229,7 @@ public final class StationData {
                 : type.insulationClass() == null ? Fact.missing(Names.ofCoil("Insulation class", view))
                         : Fact.known(type.insulationClass().limitCelsius(), null);
         return new CoilFigures(channel.impedance(winding.lowest()).value(),
-                put(Data.COIL_RESISTANCE, channel.impedance(winding.resistance20())),
+                put(Data.COIL_RESISTANCE, channel.impedance(winding.resistance20().with(winding.tolerance(), (r, tolerance) -> r))),
                 channel.impedance(winding.highest()).value(), put(Data.INDUCTANCE, inductance), closed.value(),
                 put(Data.PULL_IN_CURRENT, pullIn),
                 put(Data.DROP_OUT_CURRENT, dropOut), put(Data.THERMAL_RESISTANCE, thermal), dissipation.value(),

@@ -49,6 +49,17 @@ class PullInCurrentTest {
         assertEquals(Provenance.CATALOGUE, finding.evidence().provenance());
     }
 
+    /** A drop or tolerance that nobody stated is taken by rule, and the verdict says that it rests on an assumption. */
+    @Test
+    void whatIsTakenByRuleCountsAsAssumed() {
+        for (String unstated : new String[] { "switch_drop", "rectifier_drop", "series_resistance_tolerance", "capacitance_tolerance" }) {
+            Finding finding = Judged.finding("pull-in-current", lineCapacitorStation().driver(unstated, null));
+            assertEquals(Provenance.ASSUMED, finding.evidence().provenance(), unstated);
+        }
+        Finding finding = Judged.finding("pull-in-current", twoLevelStation().coil("resistance_tolerance", null));
+        assertEquals(Provenance.ASSUMED, finding.evidence().provenance());
+    }
+
     /** Line-capacitor at 120 V, 60 Hz: ngspice gives a peak of 0.4484966 A at mains phase 90° and 0.4397177 A at 0° (recorded cases b1, b2). */
     @Test
     void lineCapacitorTakesTheWorstPhase() {
