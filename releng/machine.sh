@@ -100,8 +100,11 @@ unlock() { exec 9>&-; }
 build() {
   local log=$1
   shift
+  # An account that the system does not know by name has no home for Java.
+  getent passwd "$(id -u)" >/dev/null || set -- -Dmaven.repo.local="${HOME:-/tmp}/.m2/repository" "$@"
   mvn -B -f "$root/pom.xml" "$@" 9>&- </dev/null 2>&1 | tee "$log" | awk '
     /^\[INFO\] Building .*\[[0-9]+\/[0-9]+\]/ { line = $0; sub(/^\[INFO\] Building /, "", line); sub(/ [0-9][^ ]*SNAPSHOT */, " ", line); print "coilbook:   " line; fflush() }
+    /^\[INFO\] Downloaded from / && ++fetched % 100 == 0 { print "coilbook:   " fetched " files fetched"; fflush() }
     /Resolving MavenDependencyRoots|Resolving target definition/ && !told { told = 1; print "coilbook:   resolving libraries (the first build fetches some 300 MB)"; fflush() }' >&2
   return "${PIPESTATUS[0]}"
 }
