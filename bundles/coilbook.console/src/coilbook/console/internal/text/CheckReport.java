@@ -78,8 +78,7 @@ public final class CheckReport {
                 out.println();
                 out.println(heading);
             }
-            out.println("  " + place(found) + "  " + finding.criterion() + "  " + finding.evidence().sentence()
-                    + (finding.missing().isEmpty() ? "" : " Missing: " + String.join(", ", finding.missing()) + "."));
+            out.println("  " + place(found) + "  " + finding.criterion() + "  " + finding.evidence().sentence());
             List<String> kinds = remediesOf(finding);
             if (!kinds.isEmpty()) {
                 out.println("      to consider: " + String.join("; ", kinds));
