@@ -21,7 +21,8 @@ public final class WaveformChart {
 
     /** Draws a waveform. */
     public static ChartImage draw(WaveformPlot plot, ChartTheme theme, ChartSize size, ChartWords words) {
-        WaveformPlots plots = new WaveformPlots(plot, theme, words, (int) Math.ceil(size.width() * size.zoom()));
+        WaveformPlots plots = new WaveformPlots(plot, theme, words, (int) Math.ceil(size.width() * size.zoom()),
+                size.height());
         JFreeChart chart = plots.chart();
         BufferedImage image = new BufferedImage(size.pixelWidth(), size.pixelHeight(), BufferedImage.TYPE_INT_RGB);
         ChartRenderingInfo drawn = new ChartRenderingInfo();

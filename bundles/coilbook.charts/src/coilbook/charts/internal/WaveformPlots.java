@@ -30,6 +30,8 @@ import coilbook.electrics.Trace;
 public final class WaveformPlots {
 
     private static final double MILLISECONDS = 1e3;
+    /** Below this height of the chart, in points, an axis is too short for its name: its unit alone stands there, the legend has the names. */
+    private static final int LOW = 260;
     private static final int VOLTAGE_SHARE = 2;
     private static final int CURRENT_SHARE = 3;
 
@@ -37,14 +39,19 @@ public final class WaveformPlots {
     private final Palette palette;
     private final ChartWords words;
     private final int slots;
+    private final boolean low;
     private final ChartFont font = new ChartFont();
 
-    /** @param slots across how many pixels the time axis can run */
-    public WaveformPlots(WaveformPlot what, ChartTheme theme, ChartWords words, int slots) {
+    /**
+     * @param slots across how many pixels the time axis can run
+     * @param height points
+     */
+    public WaveformPlots(WaveformPlot what, ChartTheme theme, ChartWords words, int slots, int height) {
         this.what = what;
         this.palette = Palette.of(theme);
         this.words = words;
         this.slots = slots;
+        this.low = height < LOW;
     }
 
     /** The chart, ready to be drawn. */
@@ -92,7 +99,7 @@ public final class WaveformPlots {
         XYSeriesCollection data = new XYSeriesCollection(series(words.sourceVoltage(), what.trace().sourceVoltage()));
         XYLineAndShapeRenderer lines = new XYLineAndShapeRenderer(true, false);
         style(lines, 0, palette.voltage(), solid());
-        return plot(data, axis(words.voltage()), lines);
+        return plot(data, axis(named(words.voltage())), lines);
     }
 
     private XYPlot currentPlot() {
@@ -101,7 +108,12 @@ public final class WaveformPlots {
         style(lines, 0, palette.current(), solid());
         level(data, lines, words.pullIn(), what.pullInCurrent(), palette.pullIn(), dashed(8, 4));
         level(data, lines, words.dropOut(), what.dropOutCurrent(), palette.dropOut(), dashed(2, 3));
-        return plot(data, axis(words.current()), lines);
+        return plot(data, axis(named(words.current())), lines);
+    }
+
+    private String named(String label) {
+        int unit = label.indexOf('[');
+        return low && unit > 0 ? label.substring(unit) : label;
     }
 
     private void level(XYSeriesCollection data, XYLineAndShapeRenderer lines, String name, double value, Color color, BasicStroke stroke) {

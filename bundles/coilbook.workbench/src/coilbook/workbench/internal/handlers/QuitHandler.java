@@ -1,13 +1,13 @@
-package coilbook.workbench.internal;
+package coilbook.workbench.internal.handlers;
 
 import org.eclipse.e4.core.di.annotations.Execute;
 import org.eclipse.e4.ui.workbench.IWorkbench;
 
-/** Closes the window and ends the program. */
+/** File › Quit. */
 public final class QuitHandler {
 
     @Execute
-    public void quit(IWorkbench workbench) {
+    void execute(IWorkbench workbench) {
         workbench.close();
     }
 }
