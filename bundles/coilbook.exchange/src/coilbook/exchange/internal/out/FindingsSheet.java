@@ -27,12 +27,10 @@ final class FindingsSheet {
     static final int CONCEDED = 8;
 
     private static final List<Column> COLUMNS = List.of(Column.of("Mark", 6), Column.of("Site", 10), Column.of("Line", 10),
-            Column.of("Station", 22),
-            Column.of("Criterion", 20), Column.of("Question", 34), Column.of("Verdict", 15), Column.of("Hazard", 8),
-            Column.of("Conceded", 10),
-            Column.of("Value", 10), Column.of("Limit", 10), Column.of("Unit", 6), Column.of("Corner", 9), Column.of("Evidence", 50),
-            Column.of("Limit and its source", 44), Column.of("Provenance", 14), Column.of("Missing", 24), Column.of("What can be done", 44),
-            Column.of("Responsible", 16), Column.of("Due", 12));
+            Column.of("Station", 22), Column.of("Criterion", 20), Column.of("Question", 32), Column.of("Verdict", 16),
+            Column.of("Hazard", 8), Column.of("Conceded", 10), Column.of("Value", 10), Column.of("Limit", 10), Column.of("Unit", 6),
+            Column.of("Corner", 9), Column.of("Evidence", 46), Column.of("Limit and its source", 38), Column.of("Provenance", 18),
+            Column.of("Missing", 24), Column.of("What can be done", 38), Column.of("Responsible", 14), Column.of("Due", 12));
 
     private final SheetOut out;
     private final Map<String, Criterion> criteria = new HashMap<>();

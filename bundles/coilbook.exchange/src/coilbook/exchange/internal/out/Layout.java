@@ -5,12 +5,16 @@ final class Layout {
 
     private static final float LINE = 13.5f;
     private static final int MOST_LINES = 12;
+    /** Letters are narrower than the digits that column widths are counted in: this many of them take the room of that many digits. */
+    private static final int LETTERS = 11;
+    private static final int DIGITS = 10;
 
     private Layout() {
     }
 
     /** The lines that a text takes when it is broken between words. */
-    static int lines(String text, int width) {
+    static int lines(String text, int columnWidth) {
+        int width = columnWidth * LETTERS / DIGITS;
         int lines = 1;
         int used = 0;
         for (String word : text.split("(?<=[ \\n])")) {

@@ -49,6 +49,10 @@ final class Styles {
         heading(Use.HEADING, white, 0x34495E);
         heading(Use.COMPUTED_HEADING, bold, 0xDDE3E9);
         wrap(Use.WRAPPED);
+        for (Use text : new Use[] { Use.TEXT, Use.WRAPPED, Use.COMPUTED_TEXT }) {
+            plain.get(text).setAlignment(HorizontalAlignment.LEFT);
+            plain.get(text).setIndention((short) 1);
+        }
         wrap(Use.NOTE);
         format(Use.WHOLE, "#,##0");
         format(Use.WHOLE_LEFT, "#,##0");
