@@ -165,7 +165,8 @@ public final class FleetInventor {
         if (plan.winding != null) {
             double measured = plan.winding * (COPPER + plan.readingTemperature) / (COPPER + 20);
             rows.add(new Reading(SubjectKind.ITEM, FittedKind.COIL.label() + "/" + plan.coilSerial, ReadingQuantity.WINDING_RESISTANCE,
-                    LocalDateTime.of(2026, 3, 2, 9, 0).plusDays(random.nextInt(90)), Math.round(measured * 1000) / 1000.0,
+                    // A minute of its own, because a coil that stands at two places by mistake may be measured at both on one day.
+                    LocalDateTime.of(2026, 3, 2, 9, plan.index % 60).plusDays(random.nextInt(90)), Math.round(measured * 1000) / 1000.0,
                     Datum.measured(plan.readingTemperature), Datum.estimated(0.01), "Bridge B-2", LocalDate.of(2026, 1, 12), "A. Fictor",
                     null,
                     null));
