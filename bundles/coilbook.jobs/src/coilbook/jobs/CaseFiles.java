@@ -48,7 +48,8 @@ public final class CaseFiles {
      * @throws CoilbookException with reason BAD_INPUT, naming every key at fault, its value and what was expected
      */
     public Solved solve(Path file) throws CoilbookException {
-        return solve(file.getFileName() == null ? file.toString() : file.getFileName().toString(), InputFile.bytes(file, MOST_BYTES));
+        Path name = file.getFileName();
+        return solve(name == null ? file.toString() : name.toString(), InputFile.bytes(file, MOST_BYTES));
     }
 
     /** As {@link #solve(Path)}, from the file's text. */

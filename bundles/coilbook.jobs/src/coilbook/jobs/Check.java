@@ -9,7 +9,6 @@ import java.util.TreeSet;
 
 import org.osgi.service.component.annotations.Activate;
 import org.osgi.service.component.annotations.Component;
-import org.osgi.service.component.annotations.Reference;
 
 import coilbook.fleet.CoilbookException;
 import coilbook.fleet.Customer;
@@ -19,27 +18,25 @@ import coilbook.fleet.Progress;
 import coilbook.fleet.Row;
 import coilbook.fleet.Site;
 import coilbook.fleet.Station;
-import coilbook.jobs.internal.NearestWord;
-import coilbook.jobs.internal.PastCopy;
+import coilbook.fleet.NearestWord;
+import coilbook.jobs.internal.PastRegister;
+import coilbook.register.AsOf;
 import coilbook.register.FleetScope;
 import coilbook.register.Register;
-import coilbook.register.Registers;
 
 /** Computes and judges a fleet as of a date; never gives a row that is behind the register. */
 @Component(service = Check.class)
 public final class Check {
 
-    private final Registers registers;
     private final Clock clock;
 
     @Activate
-    public Check(@Reference Registers registers) {
-        this(registers, Clock.systemDefaultZone());
+    public Check() {
+        this(Clock.systemDefaultZone());
     }
 
     /** With a clock of one's own, for tests. */
-    public Check(Registers registers, Clock clock) {
-        this.registers = registers;
+    public Check(Clock clock) {
         this.clock = clock;
     }
 
@@ -60,15 +57,7 @@ public final class Check {
             register.status().bringUpToDate(today, progress);
             return new CheckedFleet(register, false, scope, today);
         }
-        Register past = registers.temporary();
-        try {
-            PastCopy.fill(past, register, asOf, clock.instant(), progress);
-            past.status().bringUpToDate(asOf, progress);
-            return new CheckedFleet(past, true, scope, asOf);
-        } catch (CoilbookException | RuntimeException e) {
-            past.close();
-            throw e;
-        }
+        return new CheckedFleet(new PastRegister(register, AsOf.on(asOf), scope, progress), true, scope, asOf);
     }
 
     /** A misspelt site must not pass for one without findings. */

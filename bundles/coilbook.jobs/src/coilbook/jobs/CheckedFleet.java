@@ -9,8 +9,8 @@ import coilbook.register.Register;
 import coilbook.register.Status;
 
 /**
- * A fleet computed and judged as of a date, ready to be read. Where the date is not today's it holds a temporary register of its own, which goes when it
- * is closed; it never closes the register that was asked for.
+ * A fleet computed and judged as of a date, ready to be read. Where the date is not today's it holds status rows of its own, which go when it is closed;
+ * it never closes the register that was asked for.
  */
 public final class CheckedFleet implements AutoCloseable {
 
@@ -30,7 +30,7 @@ public final class CheckedFleet implements AutoCloseable {
         return asOf;
     }
 
-    /** The register that holds the status rows: the one asked for, or the temporary one of another date. */
+    /** The register that holds the status rows: the one asked for, or a view of it on another date. */
     public Register register() {
         return register;
     }

@@ -1,6 +1,9 @@
 package coilbook.console.internal;
 
+import java.io.OutputStreamWriter;
+import java.io.PrintStream;
 import java.io.PrintWriter;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.util.List;
 
@@ -53,12 +56,16 @@ public final class Console {
         root.getCommandSpec().version("Coilbook " + version);
         root.getSubcommands().values().forEach(command -> command.getCommandSpec().version("Coilbook " + version));
         root.setColorScheme(CommandLine.Help.defaultColorScheme(CommandLine.Help.Ansi.OFF));
-        root.setOut(new PrintWriter(terminal.out(), true));
-        root.setErr(new PrintWriter(terminal.err(), true));
+        root.setOut(writer(terminal.out()));
+        root.setErr(writer(terminal.err()));
         root.setUsageHelpWidth(110);
         root.setParameterExceptionHandler(this::usage);
         root.setExecutionExceptionHandler((problem, command, parsed) -> failed(problem));
         return root;
+    }
+
+    private static PrintWriter writer(PrintStream stream) {
+        return new PrintWriter(new OutputStreamWriter(stream, StandardCharsets.UTF_8), true);
     }
 
     private int usage(CommandLine.ParameterException problem, String[] arguments) {

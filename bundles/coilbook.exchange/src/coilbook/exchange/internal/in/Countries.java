@@ -4,8 +4,10 @@ import java.util.HashMap;
 import java.util.Locale;
 import java.util.Map;
 import java.util.MissingResourceException;
+import java.util.TreeMap;
 
 import coilbook.fleet.InvalidValue;
+import coilbook.fleet.NearestWord;
 
 /**
  * Countries by their two-letter codes (ISO 3166-1), three-letter codes, and names in English, German, French, Spanish and Portuguese as the Java runtime
@@ -52,8 +54,17 @@ final class Countries {
     String code(String heading, String text) throws InvalidValue {
         String code = byName.get(Texts.fold(text));
         if (code == null) {
-            throw new InvalidValue(heading, text, "a country by its two-letter code (ISO 3166) or its name");
+            throw new InvalidValue(heading, text, "a country by its two-letter code (ISO 3166) or its name" + nearest(text));
         }
         return code;
+    }
+
+    private static String nearest(String text) {
+        Map<String, String> english = new TreeMap<>();
+        for (String code : Locale.getISOCountries()) {
+            english.put(new Locale("", code).getDisplayCountry(Locale.ENGLISH), code);
+        }
+        String nearest = text.strip().length() < 4 ? null : NearestWord.of(text.strip(), english.keySet());
+        return nearest == null ? "" : "; the nearest is " + nearest + " (" + english.get(nearest) + ")";
     }
 }

@@ -191,20 +191,6 @@ class PatchMergeTest {
     }
 
     @Test
-    void countriesAreKnownByCodeAndNameAndTheNearestIsNamed() throws CoilbookException {
-        says(2, Site.class, "code", "A", "country", "Germany");
-        says(3, Site.class, "code", "B", "country", "usa");
-        says(4, Site.class, "code", "C", "country", "Germny");
-        PatchMerge.Outcome outcome = merge(new HeldRows());
-        assertEquals(List.of("DE", "US"), outcome.rows().stream().map(c -> ((Site) c.after()).country()).toList());
-        InputProblem problem = outcome.rejected().get(0);
-        assertEquals(4, problem.row());
-        assertEquals("Country", problem.column());
-        assertEquals("Germny", problem.value());
-        assertTrue(problem.problem().contains("Germany (DE)"), problem::problem);
-    }
-
-    @Test
     void oneSubjectTwiceInASheetIsReportedWithTheFirstPlace() throws CoilbookException {
         says(2, Station.class, "site", "DE1", "line", "L1", "tag", "G2");
         says(3, Station.class, "site", "DE1", "line", "L1", "tag", "G3");

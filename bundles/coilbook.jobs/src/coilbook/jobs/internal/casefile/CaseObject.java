@@ -9,7 +9,7 @@ import com.fasterxml.jackson.databind.JsonNode;
 
 import coilbook.fleet.FieldText;
 import coilbook.fleet.InputProblem;
-import coilbook.jobs.internal.NearestWord;
+import coilbook.fleet.NearestWord;
 
 /** One JSON object of a case file. Everything that is wrong with it is gathered, so that a person mends a file once. */
 final class CaseObject {

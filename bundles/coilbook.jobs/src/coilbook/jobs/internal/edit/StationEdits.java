@@ -30,7 +30,7 @@ import coilbook.fleet.StationView;
 import coilbook.fleet.Supply;
 import coilbook.fleet.Timed;
 import coilbook.jobs.CellEdit;
-import coilbook.jobs.internal.NearestWord;
+import coilbook.fleet.NearestWord;
 import coilbook.jobs.internal.merge.References;
 import coilbook.register.AsOf;
 import coilbook.register.Register;

@@ -18,7 +18,6 @@ import coilbook.fleet.InputProblem;
 import coilbook.fleet.InvalidValue;
 import coilbook.fleet.Kind;
 import coilbook.fleet.Row;
-import coilbook.fleet.Site;
 import coilbook.fleet.Station;
 import coilbook.fleet.Supply;
 
@@ -29,7 +28,6 @@ final class Pass {
     }
 
     private final PresentRows present;
-    private final CountryCodes countries;
     private final SequenceMerge sequences;
     private final Map<RowId, Draft> drafts = new LinkedHashMap<>();
     private final Map<RowPatch.Source, List<Draft>> byLine = new LinkedHashMap<>();
@@ -37,9 +35,8 @@ final class Pass {
     private final List<InputProblem> problems = new ArrayList<>();
     private final Set<RowPatch.Source> bad = new LinkedHashSet<>();
 
-    Pass(PresentRows present, CountryCodes countries) {
+    Pass(PresentRows present) {
         this.present = present;
-        this.countries = countries;
         this.sequences = new SequenceMerge(present);
     }
 
@@ -68,17 +65,9 @@ final class Pass {
         bad.add(line);
     }
 
-    private RowPatch normalised(RowPatch patch) throws RejectedLine {
-        if (patch.kind().type() == Site.class) {
-            Field country = patch.kind().field("country");
-            if (patch.values().get(country) instanceof String text) {
-                String code = countries.code(text);
-                if (code == null) {
-                    throw new RejectedLine(PatchRow.problem(patch, country, text, "expected " + countries.expected(text)));
-                }
-                return with(patch, country, code);
-            }
-        } else if (patch.kind().type() == Supply.class) {
+    /** A supply may name its circuit without the site. */
+    private static RowPatch normalised(RowPatch patch) {
+        if (patch.kind().type() == Supply.class) {
             Field circuit = patch.kind().field("circuit");
             if (patch.values().get(circuit) instanceof String code
                     && patch.values().get(patch.kind().field("station")) instanceof String station) {

@@ -44,13 +44,12 @@ public final class PatchMerge {
 
     /** Lays the sound lines over the present rows; attempts are repeated while lines turn out to rest on unsound ones. */
     public static Outcome merge(Incoming incoming, PresentRows present, Progress progress) throws CoilbookException {
-        CountryCodes countries = new CountryCodes();
         List<InputProblem> rejected = new ArrayList<>(incoming.rejected());
         Set<Place> excluded = new HashSet<>();
         incoming.rejected().forEach(problem -> excluded.add(Place.of(problem)));
         while (true) {
             progress.check();
-            Pass pass = new Pass(present, countries);
+            Pass pass = new Pass(present);
             takeAll(incoming, false, pass, excluded, progress);
             takeAll(incoming, true, pass, excluded, progress);
             pass.finish();
@@ -120,6 +119,7 @@ public final class PatchMerge {
         rejected.sort(Comparator.comparing(InputProblem::file).thenComparing(InputProblem::sheet).thenComparingInt(InputProblem::row));
         int lines = (int) rejected.stream().map(Place::of).distinct().count();
         int read = Math.max(incoming.read(), created + changed + unchanged + lines);
-        return new Outcome(read, created, changed, unchanged, rejected, rows, List.copyOf(incomplete));
+        // a row that says what another file said already comes without a patch of its own
+        return new Outcome(read, created, changed, read - created - changed - lines, rejected, rows, List.copyOf(incomplete));
     }
 }

@@ -1,4 +1,4 @@
-package coilbook.jobs.internal;
+package coilbook.fleet;
 
 import java.util.Collection;
 import java.util.Locale;
@@ -9,10 +9,10 @@ public final class NearestWord {
     private NearestWord() {
     }
 
-    /** The nearest of the known words, or {@code null} if none is nearer than half the word's length. */
+    /** The nearest of the known words, or {@code null} if none is near: more than two edits and more than a third of the letters away. */
     public static String of(String word, Collection<String> known) {
         String best = null;
-        int least = Math.max(2, word.length() / 2) + 1;
+        int least = Math.max(2, word.length() / 3) + 1;
         for (String candidate : known) {
             int distance = distance(word.toLowerCase(Locale.ROOT), candidate.toLowerCase(Locale.ROOT));
             if (distance < least) {
