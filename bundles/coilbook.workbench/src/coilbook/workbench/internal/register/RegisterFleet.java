@@ -40,6 +40,7 @@ import coilbook.workbench.internal.text.Texts;
 /** An open register as the window sees it. */
 final class RegisterFleet implements FleetModel {
 
+    private final String name;
     private final Register register;
     private final EditSession session;
     private final BringIn bringIn;
@@ -49,7 +50,8 @@ final class RegisterFleet implements FleetModel {
     private final Map<String, Criterion> criteria = Criteria.all().stream().collect(Collectors.toMap(Criterion::id, Function.identity()));
     private final Texts texts = Texts.of(RegisterFleet.class);
 
-    RegisterFleet(Register register, EditSession session, BringIn bringIn, Check check, Audit audit, String who) {
+    RegisterFleet(String name, Register register, EditSession session, BringIn bringIn, Check check, Audit audit, String who) {
+        this.name = name;
         this.register = register;
         this.session = session;
         this.bringIn = bringIn;
@@ -60,7 +62,7 @@ final class RegisterFleet implements FleetModel {
 
     @Override
     public String name() {
-        return register.name();
+        return name;
     }
 
     @Override

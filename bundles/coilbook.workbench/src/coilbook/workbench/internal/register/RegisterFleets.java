@@ -21,6 +21,7 @@ import coilbook.register.Register;
 import coilbook.register.Registers;
 import coilbook.workbench.internal.model.FleetModel;
 import coilbook.workbench.internal.model.Fleets;
+import coilbook.workbench.internal.text.Texts;
 
 /** Fleets in registers, by the use cases that the command line has too. */
 @Component
@@ -35,6 +36,7 @@ public final class RegisterFleets implements Fleets {
     private final Audit audit;
     private final Demo demo;
     private final Editing editing;
+    private final Texts texts = Texts.of(RegisterFleets.class);
     private final RegisterPlace place = RegisterPlace.ofThisProcess();
 
     @Activate
@@ -68,7 +70,8 @@ public final class RegisterFleets implements Fleets {
         if (create) {
             makeFolder(base);
         }
-        return model(registers.open(base, create ? OpenMode.CREATE_IF_MISSING : OpenMode.EXISTING));
+        Register register = registers.open(base, create ? OpenMode.CREATE_IF_MISSING : OpenMode.EXISTING);
+        return model(register, register.name());
     }
 
     private static void makeFolder(Path base) throws CoilbookException {
@@ -85,15 +88,15 @@ public final class RegisterFleets implements Fleets {
         Register register = registers.temporary();
         try {
             demo.fill(register, DEMO_STATIONS, DEMO_SEED, progress);
-            return model(register);
+            return model(register, texts.get("demo"));
         } catch (CoilbookException | RuntimeException e) {
             register.close();
             throw e;
         }
     }
 
-    private FleetModel model(Register register) {
+    private FleetModel model(Register register, String name) {
         String who = System.getProperty("user.name", "");
-        return new RegisterFleet(register, editing.open(register, who.isBlank() ? "workbench" : who), bringIn, check, audit, who);
+        return new RegisterFleet(name, register, editing.open(register, who.isBlank() ? "workbench" : who), bringIn, check, audit, who);
     }
 }

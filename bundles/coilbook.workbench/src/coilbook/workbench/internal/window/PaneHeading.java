@@ -34,7 +34,7 @@ public final class PaneHeading {
         label.setText(name);
         LocalResourceManager fonts = new LocalResourceManager(JFaceResources.getResources(), label);
         label.setFont(fonts.create(FontDescriptor.createFrom(label.getFont()).setStyle(SWT.BOLD)));
-        label.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, false));
+        label.setLayoutData(new GridData(SWT.FILL, SWT.CENTER, true, true));
     }
 
     /** Headings with and without controls are of one height, so that panes side by side line up. */

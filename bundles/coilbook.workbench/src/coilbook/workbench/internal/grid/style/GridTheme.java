@@ -89,6 +89,7 @@ public final class GridTheme {
         theme.selectionAnchorGradientFgColor = c.selection();
         theme.selectionAnchorSelectionGradientBgColor = c.anchor();
         theme.selectionAnchorSelectionGradientFgColor = c.anchor();
+        theme.cornerFgColor = c.muted();
         theme.sortHeaderBgColor = c.heading();
         theme.sortHeaderFgColor = c.text();
         theme.selectedSortHeaderBgColor = c.headingSelected();

@@ -2,6 +2,9 @@ package coilbook.workbench.internal.grid.style;
 
 import org.eclipse.nebula.widgets.nattable.config.CellConfigAttributes;
 import org.eclipse.nebula.widgets.nattable.config.IConfigRegistry;
+import org.eclipse.nebula.widgets.nattable.grid.GridRegion;
+import org.eclipse.nebula.widgets.nattable.painter.cell.TextPainter;
+import org.eclipse.nebula.widgets.nattable.painter.cell.decorator.PaddingDecorator;
 import org.eclipse.nebula.widgets.nattable.style.CellStyleAttributes;
 import org.eclipse.nebula.widgets.nattable.style.DisplayMode;
 import org.eclipse.nebula.widgets.nattable.style.HorizontalAlignmentEnum;
@@ -16,6 +19,8 @@ import coilbook.workbench.internal.stations.VerdictMark;
 /** Verdicts in the colours of warnings, numbers to the right, computed values muted under an italic heading. */
 public final class MarkStyles implements IThemeExtension {
 
+    private static final int PADDING = 4;
+
     private final GridColours colours;
     private final Font bold;
     private final Font italic;
@@ -28,6 +33,7 @@ public final class MarkStyles implements IThemeExtension {
 
     @Override
     public void registerStyles(IConfigRegistry registry) {
+        painters(registry);
         for (DisplayMode mode : new DisplayMode[] { DisplayMode.NORMAL, DisplayMode.SELECT }) {
             Style hazard = new Style();
             hazard.setAttributeValue(CellStyleAttributes.FOREGROUND_COLOR, colours.hazard());
@@ -43,6 +49,11 @@ public final class MarkStyles implements IThemeExtension {
             heading.setAttributeValue(CellStyleAttributes.FONT, italic);
             register(registry, heading, mode, HeadingLabels.COMPUTED_HEADING);
         }
+    }
+
+    private static void painters(IConfigRegistry registry) {
+        registry.registerConfigAttribute(CellConfigAttributes.CELL_PAINTER, new PaddingDecorator(new TextPainter(), 0, PADDING, 0, PADDING),
+                DisplayMode.NORMAL, GridRegion.CORNER);
     }
 
     private static void register(IConfigRegistry registry, Style style, DisplayMode mode, String label) {
