@@ -1,6 +1,9 @@
 # Sourced by the scripts of this folder: finds what they need on this machine, installs it where they may (root on
 # Debian), else names exactly what to install. All messages go to standard error.
 
+# Without a locale Java takes no letters beyond ASCII in file names.
+case ${LC_ALL:-${LC_CTYPE:-${LANG:-}}} in '' | C | POSIX) export LC_ALL=C.UTF-8 ;; esac
+
 say() { echo "coilbook: $*" >&2; }
 
 fail() {

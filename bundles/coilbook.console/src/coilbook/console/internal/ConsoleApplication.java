@@ -1,5 +1,6 @@
 package coilbook.console.internal;
 
+import java.io.BufferedOutputStream;
 import java.io.FileDescriptor;
 import java.io.FileOutputStream;
 import java.io.PrintStream;
@@ -29,7 +30,8 @@ public final class ConsoleApplication implements IApplication {
     public Object start(IApplicationContext context) {
         System.setProperty("java.awt.headless", "true");
         BundleContext bundles = FrameworkUtil.getBundle(ConsoleApplication.class).getBundleContext();
-        PrintStream out = new PrintStream(new FileOutputStream(FileDescriptor.out), false, StandardCharsets.UTF_8);
+        PrintStream out = new PrintStream(new BufferedOutputStream(new FileOutputStream(FileDescriptor.out), 1 << 16), false,
+                StandardCharsets.UTF_8);
         PrintStream err = new PrintStream(new FileOutputStream(FileDescriptor.err), true, StandardCharsets.UTF_8);
         boolean watched = System.console() != null || "1".equals(System.getenv("COILBOOK_STDERR_TTY"));
         Terminal terminal = new Terminal(System.in, out, err, watched, user(), RegisterPlace.ofThisProcess(),
