@@ -14,17 +14,24 @@ final class Layout {
 
     /** The lines that a text takes when it is broken between words. */
     static int lines(String text, int columnWidth) {
-        int width = columnWidth * LETTERS / DIGITS;
+        int width = Math.max(1, columnWidth * LETTERS / DIGITS);
         int lines = 1;
         int used = 0;
-        for (String word : text.split("(?<=[ \\n])")) {
-            if (used > 0 && used + word.strip().length() > width) {
+        int word = 0;
+        for (int i = 0; i <= text.length(); i++) {
+            char c = i < text.length() ? text.charAt(i) : ' ';
+            if (c != ' ' && c != '\n') {
+                word++;
+                continue;
+            }
+            if (used > 0 && used + word > width) {
                 lines++;
                 used = 0;
             }
-            lines += Math.max(0, word.length() - 1) / Math.max(1, width);
-            used += word.length();
-            if (word.endsWith("\n")) {
+            lines += Math.max(0, word - 1) / width;
+            used += word + 1;
+            word = 0;
+            if (c == '\n') {
                 lines++;
                 used = 0;
             }

@@ -1,6 +1,7 @@
 package coilbook.exchange.internal.out;
 
 import java.util.HashMap;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Objects;
 import java.util.regex.Pattern;
@@ -22,6 +23,12 @@ final class Lookups {
     private final Map<Kind<?>, Integer> keyColumns = new HashMap<>();
     private final Map<Kind<?>, Map<String, Integer>> rows = new HashMap<>();
     private final Map<Kind<?>, Map<String, Integer>> ignoringCase = new HashMap<>();
+    private final Map<Kind<?>, Map<String, Boolean>> foundByKey = new HashMap<>();
+    private final Map<Kind<?>, Map<Integer, Around>> arounds = new HashMap<>();
+
+    /** A lookup's text before and after the cell with the key. */
+    private record Around(String before, String after) {
+    }
 
     /**
      * @param keyColumn where the whole key stands in one cell
@@ -36,7 +43,7 @@ final class Lookups {
     /** Notes the row being written. */
     void note(Kind<?> kind, String key) {
         rows.get(kind).put(key, sheets.get(kind).out().row());
-        ignoringCase.get(kind).merge(key.toLowerCase(java.util.Locale.ROOT), 1, Integer::sum);
+        ignoringCase.get(kind).merge(key.toLowerCase(Locale.ROOT), 1, Integer::sum);
     }
 
     /**
@@ -55,17 +62,29 @@ final class Lookups {
         if (row == null) {
             return null;
         }
-        EntitySheet sheet = sheets.get(kind);
-        String name = "'" + kind.sheet() + "'!";
-        String column = CellReference.convertNumToColString(valueColumn);
-        boolean unique = Objects.equals(ignoringCase.get(kind).get(key.toLowerCase(java.util.Locale.ROOT)), 1);
-        if (!unique || !PLAIN.matcher(key).matches()) {
-            return name + "$" + column + "$" + row;
+        if (!foundByKey.computeIfAbsent(kind, k -> new HashMap<>()).computeIfAbsent(key, k -> isFoundByKey(kind, k))) {
+            return sheetName(kind) + "$" + CellReference.convertNumToColString(valueColumn) + "$" + row;
         }
-        String keys = CellReference.convertNumToColString(keyColumns.get(kind));
-        int last = sheet.out().row();
-        return "INDEX(" + name + "$" + column + "$2:$" + column + "$" + last + ",MATCH(" + keyCell + "," + name + "$" + keys + "$2:$" + keys
-                + "$" + last
-                + ",0))";
+        Around around = arounds.computeIfAbsent(kind, k -> new HashMap<>()).computeIfAbsent(valueColumn, c -> around(kind, c));
+        return around.before + keyCell + around.after;
+    }
+
+    private boolean isFoundByKey(Kind<?> kind, String key) {
+        return Objects.equals(ignoringCase.get(kind).get(key.toLowerCase(Locale.ROOT)), 1) && PLAIN.matcher(key).matches();
+    }
+
+    private Around around(Kind<?> kind, int valueColumn) {
+        String keys = column(kind, keyColumns.get(kind));
+        return new Around("INDEX(" + column(kind, valueColumn) + ",MATCH(", "," + keys + ",0))");
+    }
+
+    /** The cells of a column below its heading. */
+    private String column(Kind<?> kind, int column) {
+        String letters = CellReference.convertNumToColString(column);
+        return sheetName(kind) + "$" + letters + "$2:$" + letters + "$" + sheets.get(kind).out().row();
+    }
+
+    private static String sheetName(Kind<?> kind) {
+        return "'" + kind.sheet() + "'!";
     }
 }

@@ -26,7 +26,7 @@ final class SheetOut {
     private final SXSSFSheet sheet;
     private final Styles styles;
     private final List<Column> columns;
-    private final int headingRow;
+    private final String[] letters;
     private Row row;
     private int next;
     private int nextRow;
@@ -38,8 +38,9 @@ final class SheetOut {
         this.sheet = sheet;
         this.styles = styles;
         this.columns = List.copyOf(columns);
-        this.headingRow = 0;
+        this.letters = new String[columns.size()];
         for (int i = 0; i < columns.size(); i++) {
+            letters[i] = "$" + CellReference.convertNumToColString(i);
             sheet.setColumnWidth(i, columns.get(i).width() * 256 + 128);
         }
         sheet.createFreezePane(frozenColumns, 1);
@@ -89,7 +90,7 @@ final class SheetOut {
 
     /** The rows written so far, the headings left out. */
     int rows() {
-        return nextRow - 1 - headingRow;
+        return nextRow - 1;
     }
 
     /** The column that the next cell goes to, counted from 0. */
@@ -99,7 +100,7 @@ final class SheetOut {
 
     /** The cell of a column in the row being written, for formulas of the same sheet; the column stays when the cell is copied sideways. */
     String here(int column) {
-        return "$" + CellReference.convertNumToColString(column) + row();
+        return letters[column] + row();
     }
 
     void skip() {
