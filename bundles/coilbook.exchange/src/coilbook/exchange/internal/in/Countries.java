@@ -13,7 +13,7 @@ import coilbook.fleet.NearestWord;
  * Countries by their two-letter codes (ISO 3166-1), three-letter codes, and names in English, German, French, Spanish and Portuguese as the Java runtime
  * knows them, with a few everyday names beside.
  */
-final class Countries {
+public final class Countries {
 
     private static final String[] EVERYDAY = { "GB=uk=u k=great britain=england=scotland=wales=northern ireland",
             "US=usa=u s a=u s=united states of america=america",
@@ -23,7 +23,7 @@ final class Countries {
 
     private final Map<String, String> byName = new HashMap<>();
 
-    Countries() {
+    public Countries() {
         for (Locale language : new Locale[] { Locale.ENGLISH, Locale.GERMAN, Locale.FRENCH, new Locale("es"), new Locale("pt") }) {
             for (String code : Locale.getISOCountries()) {
                 byName.putIfAbsent(Texts.fold(new Locale("", code).getDisplayCountry(language)), code);
@@ -51,7 +51,7 @@ final class Countries {
     }
 
     /** The two-letter code. */
-    String code(String heading, String text) throws InvalidValue {
+    public String code(String heading, String text) throws InvalidValue {
         String code = byName.get(Texts.fold(text));
         if (code == null) {
             throw new InvalidValue(heading, text, "a country by its two-letter code (ISO 3166) or its name" + nearest(text));
