@@ -8,8 +8,10 @@ import java.util.List;
 /** Puts a station's figures together into the circuit of a corner, tolerances on their unfavourable side, and knows what is missing. */
 final class CornerCircuits {
 
-    /** Off-time after which a circuit counts as rested, s. */
-    private static final double REST = 0.25;
+    /** Least off-time of a cycle that is to end at rest, s. */
+    private static final double REST = 5e-3;
+    /** Time constants after which a circuit has settled: e^(−14) is a millionth. */
+    private static final double SETTLE = 14;
     private static final double DIODE = 0.7;
 
     private final StationCircuit station;
@@ -157,27 +159,34 @@ final class CornerCircuits {
         return build(corner, winding, restedRate(onTime), onTime);
     }
 
-    /** Held on so long that the hold window shows the hold without end. */
+    /** Held on so long that the hold window, of whole half-waves, shows the hold without end. */
     CircuitCase heldOn(Corner corner, double winding) {
-        double slowest = hasInductance() ? coil.inductance() / coil.resistance20() : 0;
+        double onTime = 2 * (SETTLE * slowest() + changeTime());
         if (lineOperated()) {
-            slowest = Math.max(slowest, or(driver.capacitance(), 0) * driver.seriesResistance());
+            double halfWave = 0.5 / station.supply().frequency();
+            onTime = 2 * halfWave * Math.ceil(0.5 * onTime / halfWave + 1);
         }
-        double onTime = Math.max(longOnTime(), 40 * slowest);
         return build(corner, winding, 1 / (onTime * 1.001), onTime);
     }
 
+    /** The rate of a cycle that ends with the coil at rest; the capacitor is full at the start of a first cycle anyway. */
     private double restedRate(double onTime) {
-        double slowest = hasInductance() ? coil.inductance() / coil.resistance20() : 0;
-        if (lineOperated()) {
-            slowest = Math.max(slowest, driver.capacitance() * driver.seriesResistance());
-        }
-        return 1 / (onTime + Math.max(REST, 20 * slowest));
+        double release = SETTLE * (hasInductance() ? coil.inductance() / coil.lowestResistance20() : 0);
+        return 1 / (onTime + Math.max(REST, release));
     }
 
     private double longOnTime() {
-        double change = Math.max(or(driver.pullInTime(), 0), or(driver.peakTime(), 0));
-        return Math.max(0.5, 20 * change);
+        return 2 * (SETTLE * slowest() + changeTime()) + REST;
+    }
+
+    /** Slowest time constant, s. */
+    private double slowest() {
+        double slowest = hasInductance() ? Math.max(coil.inductance(), or(coil.inductanceClosed(), 0)) / coil.lowestResistance20() : 0;
+        return lineOperated() ? Math.max(slowest, 1.5 * driver.capacitance() * driver.seriesResistance()) : slowest;
+    }
+
+    private double changeTime() {
+        return Math.max(or(driver.pullInTime(), 0), or(driver.peakTime(), 0));
     }
 
     private DriverCircuit driver(Corner corner) {

@@ -8,7 +8,8 @@ import java.util.List;
 final class RateLimits {
 
     private static final int PHASES = 4;
-    private static final int HALVINGS = 7;
+    private static final int STEPS = 12;
+    private static final double PRECISION = 0.01;
     /** A rate at which the on-time would fill the whole period cannot be computed; limits are looked for up to this share of it. */
     private static final double FULLEST = 0.95;
 
@@ -62,28 +63,46 @@ final class RateLimits {
         if (!missing.isEmpty()) {
             return Derived.missing(at, missing);
         }
-        double high = FULLEST / station.onTime();
-        if (pullsIn(high)) {
-            return new Derived(Double.POSITIVE_INFINITY, at, List.of(), List.of());
-        }
-        double low = Math.min(1 / (station.onTime() + 1), 0.1 * high);
-        if (!pullsIn(low)) {
-            return new Derived(0, at, List.of(), List.of());
-        }
-        for (int halving = 0; halving < HALVINGS; halving++) {
-            double middle = 2 / (1 / low + 1 / high);
-            if (pullsIn(middle)) {
-                low = middle;
-            } else {
-                high = middle;
-            }
-        }
-        return new Derived(low, at, List.of(), List.of());
+        return new Derived(recovers(), at, List.of(), List.of());
     }
 
-    private boolean pullsIn(double rate) throws IllegalCaseException {
-        CircuitCase circuit = circuits.build(Corner.LOW_HOT, lowWinding, rate, station.onTime());
-        return !Double.isNaN(SteadySearch.overPhases(circuit, PHASES).worst().timeToPullIn());
+    /** Looks for the period at which the least peak is just the pull-in current. */
+    private double recovers() throws IllegalCaseException {
+        double shortest = station.onTime() / FULLEST;
+        double shortage = shortage(shortest);
+        if (shortage <= 0) {
+            return Double.POSITIVE_INFINITY;
+        }
+        double longest = Math.max(station.onTime() + 1, 10 * shortest);
+        double reserve = -shortage(longest);
+        if (reserve < 0) {
+            return 0;
+        }
+        int side = 0;
+        for (int step = 0; step < STEPS && longest - shortest > PRECISION * longest; step++) {
+            // recharging is about exponential: the peak is nearer to its last value than a straight line says
+            double period = step < 2 ? Math.sqrt(shortest * longest)
+                    : shortest + (longest - shortest) * shortage / (shortage + reserve);
+            double lacks = shortage(period);
+            if (lacks > 0) {
+                shortest = period;
+                shortage = lacks;
+                reserve *= side == 1 ? 0.5 : 1;
+                side = 1;
+            } else {
+                longest = period;
+                reserve = -lacks;
+                shortage *= side == -1 ? 0.5 : 1;
+                side = -1;
+            }
+        }
+        return 1 / longest;
+    }
+
+    /** By how much the least peak falls short of the pull-in current, A. */
+    private double shortage(double period) throws IllegalCaseException {
+        CircuitCase circuit = circuits.build(Corner.LOW_HOT, lowWinding, 1 / period, station.onTime());
+        return station.coil().pullInCurrent() - SteadySearch.overPhases(circuit, PHASES).worst().peakCurrent();
     }
 
     private Derived byRelease(Derived releaseTime) {

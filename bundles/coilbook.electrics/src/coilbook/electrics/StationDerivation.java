@@ -73,7 +73,7 @@ public final class StationDerivation {
         CircuitCase circuit = circuits.quick(Corner.NOMINAL, nominalWinding);
         circuit.check();
         cases.put(Corner.NOMINAL, circuit);
-        return SteadySearch.overPhases(circuit, SteadySearch.PHASES / 2);
+        return SteadySearch.overPhases(circuit, SteadySearch.PHASES / 4);
     }
 
     private double heat(double rms, double celsius) {

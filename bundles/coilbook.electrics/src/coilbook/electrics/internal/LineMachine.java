@@ -10,6 +10,8 @@ final class LineMachine extends CycleMachine {
     /** Pieces shorter than this share of the cycle that follow one another mean that two limits chatter within rounding. */
     private static final double TRIFLE = 1e-13;
     private static final int CHATTER = 6;
+    /** Nearer to the crest than this, rad, a charge is nothing. */
+    private static final double CREST = 1e-6;
 
     private final LineParameters line;
     private final Walker walker;
@@ -238,14 +240,16 @@ final class LineMachine extends CycleMachine {
             piece.start(bus, theta, Double.POSITIVE_INFINITY);
             double went;
             boolean ended;
-            if (!conducting && line.bleedConductance == 0) {
-                double wait = untilForward(theta);
-                ended = wait < left;
-                went = ended ? wait : left;
-                piece.at(went);
-            } else {
+            if (line.bleedConductance > 0) {
                 went = walker.walk(piece, time, left, blind, false, false);
                 ended = walker.ended();
+            } else if (conducting) {
+                went = charge(piece, left, blind);
+                ended = went < left;
+            } else {
+                went = Math.min(left, Math.max(blind, untilForward(theta)));
+                ended = went < left;
+                piece.at(went);
             }
             bus = piece.bus;
             if (sink != null) {
@@ -262,6 +266,21 @@ final class LineMachine extends CycleMachine {
         }
     }
 
+    /** One charge of the resting capacitor in closed form: what the rectifier carried is on the capacitor. Gives its length. */
+    private double charge(IdleBusPiece piece, double left, double atLeast) {
+        double went = Math.min(left, Math.max(atLeast, piece.conductsFor(left)));
+        walker.drawnPeak = Math.max(walker.drawnPeak, piece.drawnCrest(went, walker.drawnPeak));
+        double square = piece.drawnSquare(went);
+        piece.at(went);
+        double carried = line.capacitance * (piece.bus - bus);
+        totals.add(Totals.DRAWN_SQUARE, square);
+        totals.add(Totals.RECTIFIER, carried);
+        totals.add(Totals.SOURCE_ENERGY, line.seriesResistance * square + line.bridgeDrop * carried
+                + 0.5 * line.capacitance * (piece.bus - bus) * (piece.bus + bus));
+        walker.busPeak = Math.max(walker.busPeak, piece.bus);
+        return went;
+    }
+
     /** Time until the mains next exceeds the resting capacitor, s; infinity if it never does. */
     private double untilForward(double theta) {
         double share = (bus + line.bridgeDrop) / line.mainsPeak;
@@ -270,10 +289,8 @@ final class LineMachine extends CycleMachine {
         }
         double angle = LineParameters.halfWave(theta);
         double rise = Math.asin(Math.max(0, share));
-        double wait = rise - angle;
-        if (wait < 0) {
-            wait = angle < Math.PI - rise - 1e-9 ? 0 : wait + Math.PI;
-        }
+        // at rest past the crest the mains is falling below the capacitor: the next half-wave is meant, whatever rounding says
+        double wait = angle > 0.5 * Math.PI - CREST ? Math.PI + rise - angle : Math.max(0, rise - angle);
         return wait / line.omega;
     }
 

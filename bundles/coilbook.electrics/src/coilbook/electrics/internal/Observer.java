@@ -58,7 +58,7 @@ final class Observer {
     /** A stretch of a piece that began at the given time; a, b since then, with current and slope at both. */
     void stretch(Piece piece, double base, double a, double currentA, double slopeA, double b, double currentB, double slopeB) {
         if (slopeA > 0 != slopeB > 0 && slopeA != 0 && slopeB != 0) {
-            double turn = Roots.slopeVanishes(piece, a, b);
+            double turn = Roots.slopeVanishes(piece, a, slopeA, b, slopeB);
             double currentTurn = piece.current;
             monotone(piece, base, a, currentA, turn, currentTurn);
             monotone(piece, base, turn, currentTurn, b, currentB);
@@ -69,10 +69,10 @@ final class Observer {
 
     private void monotone(Piece piece, double base, double a, double currentA, double b, double currentB) {
         if (Double.isNaN(timeToPullIn) && currentB >= pullIn) {
-            timeToPullIn = base + (currentA >= pullIn ? a : Roots.currentCrosses(piece, pullIn, a, b));
+            timeToPullIn = base + (currentA >= pullIn ? a : Roots.currentCrosses(piece, pullIn, a, currentA, b, currentB));
         }
         if (!Double.isNaN(timeToPullIn) && Double.isNaN(fluxLostAt) && currentB < holdsFluxAt) {
-            fluxLostAt = base + (currentA <= holdsFluxAt ? a : Roots.currentCrosses(piece, holdsFluxAt, a, b));
+            fluxLostAt = base + (currentA <= holdsFluxAt ? a : Roots.currentCrosses(piece, holdsFluxAt, a, currentA, b, currentB));
         }
         if (base + b >= holdStart) {
             holdMinimum = Math.min(holdMinimum, leastFrom(piece, base, a, currentA, currentB, holdStart));
@@ -100,13 +100,13 @@ final class Observer {
         double start = Math.max(a, from - base);
         if (currentB < dropOut) {
             if (Double.isNaN(belowSince)) {
-                belowSince = base + (currentA <= dropOut ? start : Math.max(start, Roots.currentCrosses(piece, dropOut, a, b)));
+                belowSince = base + (currentA <= dropOut ? start : Math.max(start, Roots.currentCrosses(piece, dropOut, a, currentA, b, currentB)));
             }
         } else if (currentA < dropOut) {
             if (Double.isNaN(belowSince)) {
                 belowSince = base + start;
             }
-            endBelow(base + Roots.currentCrosses(piece, dropOut, a, b));
+            endBelow(base + Roots.currentCrosses(piece, dropOut, a, currentA, b, currentB));
         }
     }
 

@@ -72,7 +72,7 @@ final class Walker {
             }
             int late = firstLate(piece, blind);
             if (late > 0) {
-                double end = Roots.marginEnds(piece, time[late - 1], time[late]);
+                double end = Roots.marginEnds(piece, time[late - 1], margin[late - 1], time[late], margin[late]);
                 ended = true;
                 panel = end - a;
                 if (panel <= 0) {
@@ -167,8 +167,12 @@ final class Walker {
         if (piece.margin() > 0) {
             return false;
         }
-        time[middle] = foot < time[middle] ? time[middle - 1] : time[middle];
+        if (foot < time[middle]) {
+            time[middle] = time[middle - 1];
+            margin[middle] = margin[middle - 1];
+        }
         time[middle + 1] = foot;
+        margin[middle + 1] = piece.margin();
         return true;
     }
 
