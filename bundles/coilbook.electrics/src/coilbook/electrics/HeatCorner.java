@@ -9,12 +9,13 @@ final class HeatCorner {
 
     /** Few phases are enough for energy, which as a smooth periodic function of phase averages out fast. */
     private static final int PHASES = 4;
-    private static final double TOLERANCE = 1e-3;
+    private static final double TOLERANCE = 5e-3;
 
     private final CornerCircuits circuits;
     private final StationCircuit station;
     private final Corner corner;
     private final double thermalResistance;
+    private final SteadySearch.Series series = new SteadySearch.Series(PHASES);
     private final List<String> missing;
     private final List<String> bounded = new ArrayList<>();
 
@@ -35,7 +36,12 @@ final class HeatCorner {
 
     /** Mean heat per cycle at a winding temperature and rate, J. */
     double energy(double celsius, double rate) throws IllegalCaseException {
-        return SteadySearch.overPhases(circuits.build(corner, celsius, rate, station.onTime()), PHASES).meanWindingEnergy();
+        return steady(celsius, rate).meanWindingEnergy();
+    }
+
+    /** The repeating cycle at a winding temperature and rate. */
+    SteadyResult steady(double celsius, double rate) throws IllegalCaseException {
+        return series.next(circuits.build(corner, celsius, rate, station.onTime()));
     }
 
     /** The steady state at duty; its temperature is NaN if data are missing. */

@@ -9,7 +9,6 @@ final class MainsSide {
 
     /** Voltage below which a charge counts as harmless after disconnection, V (IEC 60204-1, 6.2.4). */
     private static final double HARMLESS = 60;
-    private static final int PHASES = 4;
 
     private final CornerCircuits circuits;
     private final StationCircuit station;
@@ -32,7 +31,7 @@ final class MainsSide {
         }
         winding = Double.isFinite(atDuty.celsius()) ? atDuty.celsius() : CornerCircuits.or(station.highestAmbient(), 20);
         if (circuits.dutyKnown() && station.meanRate() > 0) {
-            duty = SteadySearch.overPhases(circuits.atDuty(Corner.HOT, winding), PHASES);
+            duty = hot.steady(winding, station.meanRate());
         }
         if (circuits.lineOperated()) {
             stuckWinding = Double.isFinite(stuck.celsius()) ? stuck.celsius() : winding;

@@ -17,6 +17,7 @@ final class RateLimits {
     private final StationCircuit station;
     private final HeatCorner hot;
     private final double lowWinding;
+    private final SteadySearch.Series series = new SteadySearch.Series(PHASES);
 
     RateLimits(CornerCircuits circuits, StationCircuit station, HeatCorner hot, double lowWinding) {
         this.circuits = circuits;
@@ -102,7 +103,7 @@ final class RateLimits {
     /** By how much the least peak falls short of the pull-in current, A. */
     private double shortage(double period) throws IllegalCaseException {
         CircuitCase circuit = circuits.build(Corner.LOW_HOT, lowWinding, 1 / period, station.onTime());
-        return station.coil().pullInCurrent() - SteadySearch.overPhases(circuit, PHASES).worst().peakCurrent();
+        return station.coil().pullInCurrent() - series.next(circuit).worst().peakCurrent();
     }
 
     private Derived byRelease(Derived releaseTime) {

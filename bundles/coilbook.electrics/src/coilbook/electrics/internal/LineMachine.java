@@ -8,8 +8,10 @@ import coilbook.electrics.IllegalCaseException;
 final class LineMachine extends CycleMachine {
 
     /** Pieces shorter than this share of the cycle that follow one another mean that two limits chatter within rounding. */
-    private static final double TRIFLE = 1e-13;
+    private static final double TRIFLE = 1e-9;
     private static final int CHATTER = 6;
+    /** By this share of the mains peak the capacitor must exceed the switch drop before a coil at rest takes over. */
+    private static final double WAKE = 1e-12;
     /** Nearer to the crest than this, rad, a charge is nothing. */
     private static final double CREST = 1e-6;
 
@@ -164,7 +166,7 @@ final class LineMachine extends CycleMachine {
     }
 
     private double idleStretch(IdleBusPiece piece, double theta, double time, double left, boolean hold) throws IllegalCaseException {
-        piece.start(bus, theta, line.switchDrop);
+        piece.start(bus, theta, line.switchDrop + WAKE * line.mainsPeak);
         double went = walker.walk(piece, time, left, blind, true, hold);
         take(piece, time, went);
         current = 0;
@@ -200,7 +202,7 @@ final class LineMachine extends CycleMachine {
             trifles = 0;
             blind = 0;
         } else if (++trifles > CHATTER) {
-            blind = Math.max(2 * blind, 10 * TRIFLE * period);
+            blind = Math.max(2 * blind, 1e-3 * TRIFLE * period);
         }
     }
 

@@ -100,7 +100,8 @@ final class Observer {
         double start = Math.max(a, from - base);
         if (currentB < dropOut) {
             if (Double.isNaN(belowSince)) {
-                belowSince = base + (currentA <= dropOut ? start : Math.max(start, Roots.currentCrosses(piece, dropOut, a, currentA, b, currentB)));
+                belowSince = base
+                        + (currentA <= dropOut ? start : Math.max(start, Roots.currentCrosses(piece, dropOut, a, currentA, b, currentB)));
             }
         } else if (currentA < dropOut) {
             if (Double.isNaN(belowSince)) {

@@ -20,9 +20,11 @@ public final class SteadySearch {
 
     private static final double SAME = 1e-3;
     private static final int MOST_CYCLES = 4096;
-    /** Panels after which the search gives up: a second or two. */
-    private static final long MOST_EFFORT = 2_000_000;
+    /** Panels after which the search gives up: about half a second. */
+    private static final long MOST_EFFORT = 400_000;
     private static final int WARM_UP = 2;
+    /** States so near to those of a neighbouring circuit, as a share of full scale, need no second pass. */
+    private static final double NEAR = 3e-4;
 
     private final CircuitCase circuit;
     private final CycleMachine machine;
@@ -43,13 +45,38 @@ public final class SteadySearch {
         if (Machines.phaseStep(circuit) == 0) {
             return search.result(List.of(search.forward(circuit.mains().phase())));
         }
-        return search.overPhases(PHASES);
+        return search.overPhases(search.warmUp(PHASES), false);
     }
 
     /** The repeating cycle over a number of evenly spaced phases of the mains, whether locked or not: what holds whenever the timer may fire. */
     public static SteadyResult overPhases(CircuitCase circuit, int phases) throws IllegalCaseException {
         SteadySearch search = new SteadySearch(circuit);
-        return Machines.feelsMains(circuit) ? search.overPhases(phases) : search.result(List.of(search.forward(0)));
+        return Machines.feelsMains(circuit) ? search.overPhases(search.warmUp(phases), false) : search.result(List.of(search.forward(0)));
+    }
+
+    /**
+     * A search over the same circuit with small changes, as of temperature: each begins with the states that the one before ended with. Not for use by
+     * several threads.
+     */
+    public static final class Series {
+
+        private final int phases;
+        private PhaseStates states;
+
+        public Series(int phases) {
+            this.phases = phases;
+        }
+
+        /** The repeating cycle over the phases. */
+        public SteadyResult next(CircuitCase circuit) throws IllegalCaseException {
+            SteadySearch search = new SteadySearch(circuit);
+            if (!Machines.feelsMains(circuit)) {
+                return search.result(List.of(search.forward(0)));
+            }
+            boolean near = states != null;
+            states = near ? states : search.warmUp(phases);
+            return search.overPhases(states, near);
+        }
     }
 
     /** The first cycle after rest, over a number of evenly spaced phases of the mains. */
@@ -70,17 +97,16 @@ public final class SteadySearch {
         return new SteadyResult(worst(byPhase, slowest), byPhase, slowest, settled);
     }
 
-    private SteadyResult overPhases(int phases) throws IllegalCaseException {
-        machine.restart(0);
-        for (int cycle = 0; cycle < WARM_UP; cycle++) {
-            machine.cycle();
-        }
-        PhaseStates states = new PhaseStates(phases, machine.source(), machine.current, machine.plunger.isClosed());
+    private SteadyResult overPhases(PhaseStates states, boolean near) throws IllegalCaseException {
+        int phases = states.count();
         double step = Machines.phaseStep(circuit);
         List<CycleResult> last = pass(states);
         long effort = machine.work();
         for (int pass = 1; pass <= MOST_CYCLES; pass++) {
             double moved = states.shift(step);
+            if (near && moved < NEAR) {
+                return result(last);
+            }
             List<CycleResult> next = pass(states);
             effort += phases * machine.work();
             slowest = WARM_UP + pass + 1;
@@ -88,6 +114,7 @@ public final class SteadySearch {
             // what further passes could still change is what this one will hand on, as a share of what it was handed itself
             double share = moved > 0 ? moves / moved : 0;
             if (share < 1 && agree(last, next, share) || states.settled(moves)) {
+                states.shift(step);
                 return result(next);
             }
             if (effort > MOST_EFFORT) {
@@ -97,6 +124,14 @@ public final class SteadySearch {
         }
         settled = false;
         return result(last);
+    }
+
+    private PhaseStates warmUp(int phases) throws IllegalCaseException {
+        machine.restart(0);
+        for (int cycle = 0; cycle < WARM_UP; cycle++) {
+            machine.cycle();
+        }
+        return new PhaseStates(phases, machine.source(), machine.current, machine.plunger.isClosed());
     }
 
     /** Runs one cycle at every phase and keeps the states in which they end. */
