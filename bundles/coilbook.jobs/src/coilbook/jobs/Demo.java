@@ -64,6 +64,20 @@ public final class Demo {
         List<RowChange> changes = new ArrayList<>(rows.size());
         rows.stream().sorted(Comparator.comparingInt(row -> Kind.ALL.indexOf(Kind.of(row))))
                 .forEach(row -> changes.add(RowChange.insert(row)));
-        register.apply(new Change(WHO, clock.instant(), why, changes), progress);
+        register.apply(new Change(WHO, clock.instant(), why, changes), new Quiet(progress));
+    }
+
+    /** Lets a step be cancelled, but tells nothing of it: the person follows the stations, not each step's rows. */
+    private record Quiet(Progress whole) implements Progress {
+
+        @Override
+        public void report(String step, long done, long total) {
+            // the whole reports
+        }
+
+        @Override
+        public boolean isCancelled() {
+            return whole.isCancelled();
+        }
     }
 }

@@ -1,5 +1,7 @@
 package coilbook.console.internal.command;
 
+import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.concurrent.Callable;
 
@@ -15,6 +17,7 @@ import coilbook.console.internal.Json;
 import coilbook.console.internal.Services;
 import coilbook.console.internal.Terminal;
 import coilbook.console.internal.Work;
+import coilbook.fleet.CoilbookException;
 import coilbook.jobs.Demo;
 import coilbook.register.OpenMode;
 import coilbook.register.Register;
@@ -49,9 +52,7 @@ public final class DemoCommand implements Callable<Integer> {
                     "--stations is " + stations + "; expected a whole number from 1 to " + Demo.MOST_STATIONS);
         }
         Path base = register.base(terminal);
-        try (Work work = new Work(terminal); Register open = services.registers().get().open(base, OpenMode.CREATE_NEW)) {
-            services.demo().get().fill(open, stations, seed, work.progress());
-        }
+        fill(base);
         if (json) {
             Json.write(terminal.out(), generator -> {
                 generator.writeStringField("register", base.toString());
@@ -62,5 +63,21 @@ public final class DemoCommand implements Callable<Integer> {
             terminal.out().println(stations + " invented stations stand in " + base + ".");
         }
         return ExitCode.DONE;
+    }
+
+    /** A demonstration that could not be finished leaves no register that would stand in the way of the next. */
+    private void fill(Path base) throws CoilbookException, IOException {
+        boolean made = false;
+        boolean complete = false;
+        try (Work work = new Work(terminal); Register open = services.registers().get().open(base, OpenMode.CREATE_NEW)) {
+            made = true;
+            services.demo().get().fill(open, stations, seed, work.progress());
+            complete = true;
+        } finally {
+            if (made && !complete) {
+                Files.deleteIfExists(base.resolveSibling(base.getFileName() + ".mv.db"));
+                Files.deleteIfExists(base.resolveSibling(base.getFileName() + ".view.mv.db"));
+            }
+        }
     }
 }

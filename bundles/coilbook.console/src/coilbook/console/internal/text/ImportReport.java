@@ -53,9 +53,9 @@ public final class ImportReport {
             for (InputProblem problem : result.rejected()) {
                 generator.writeStartObject();
                 generator.writeStringField("file", problem.file());
-                Json.text(generator, "sheet", problem.sheet());
+                generator.writeStringField("sheet", problem.sheet());
                 generator.writeNumberField("row", problem.row());
-                Json.text(generator, "column", problem.column());
+                generator.writeStringField("column", problem.column());
                 generator.writeStringField("value", problem.value());
                 generator.writeStringField("problem", problem.problem());
                 generator.writeEndObject();

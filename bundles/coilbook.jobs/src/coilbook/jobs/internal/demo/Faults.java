@@ -93,5 +93,9 @@ public final class Faults {
         plan.driver = "CAP-120";
         plan.setting = "120";
         plan.circuit = plan.market.highCircuit();
+        plan.cableLength = 6.0;
+        plan.rate = 4;
+        plan.onTime = 0.030;
+        plan.winding = null;
     }
 }

@@ -51,7 +51,11 @@ public final class FleetInventor {
     private static final double[] RATES = { 3, 4, 5, 6, 8 };
     private static final double[] ON_TIMES = { 0.020, 0.025, 0.030, 0.040 };
     private static final double[] LENGTHS = { 4, 6, 8, 12, 15 };
-    private static final double[] SPREAD = { 0.98, 0.99, 1.0, 1.01, 1.02 };
+    /** Line-operated drivers stand on slow machines of few patterns. */
+    private static final double[] LINE_OPERATED_RATES = { 3, 4 };
+    private static final double[] LINE_OPERATED_LENGTHS = { 6, 8 };
+    private static final double LINE_OPERATED_ON_TIME = 0.030;
+    private static final double[] SPREAD = { 0.98, 1.0, 1.015 };
     private static final LocalDate FIRST_FITTED = LocalDate.of(2023, 1, 9);
 
     private final long seed;
@@ -103,6 +107,11 @@ public final class FleetInventor {
         plan.cableLength = pick(LENGTHS, random);
         plan.rate = pick(RATES, random);
         plan.onTime = pick(ON_TIMES, random);
+        if (plan.isLineOperated()) {
+            plan.cableLength = LINE_OPERATED_LENGTHS[random.nextInt(LINE_OPERATED_LENGTHS.length)];
+            plan.rate = LINE_OPERATED_RATES[random.nextInt(LINE_OPERATED_RATES.length)];
+            plan.onTime = LINE_OPERATED_ON_TIME;
+        }
         plan.coilSerial = coilSerial(index);
         if (random.nextInt(4) == 0) {
             plan.winding = plan.coilOhms * pick(SPREAD, random);

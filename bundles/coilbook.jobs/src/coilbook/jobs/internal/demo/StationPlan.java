@@ -39,6 +39,10 @@ final class StationPlan {
         use(Combination.of(market).get(0));
     }
 
+    boolean isLineOperated() {
+        return driver.startsWith("CAP-");
+    }
+
     void useCoil(String code, double ohms) {
         coil = code;
         coilOhms = ohms;
