@@ -8,6 +8,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.io.RandomAccessFile;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.nio.file.StandardCopyOption;
 import java.sql.Connection;
 import java.sql.SQLException;
 import java.sql.Statement;
@@ -24,7 +25,10 @@ import org.junit.jupiter.params.provider.ValueSource;
 
 import coilbook.fleet.CoilbookException;
 import coilbook.fleet.CoilbookException.Reason;
+import coilbook.fleet.Customer;
+import coilbook.fleet.Kind;
 import coilbook.fleet.Progress;
+import coilbook.register.internal.file.FileInspection;
 
 /** Files that are no register of ours, or more than that, are refused with words and never act. */
 class HostileFilesTest {
@@ -224,5 +228,38 @@ class HostileFilesTest {
             assertEquals(1, register.head(), "the first goes on");
         }
         FleetFixture.registers().open(base, OpenMode.EXISTING).close();
+    }
+
+    /** A process killed deep in a long change leaves a log of many pages over many tables; that is no damage, and nothing of the change stays. */
+    @Test
+    void aLongUnfinishedChangeIsTakenBack() throws Exception {
+        JdbcConnectionPool pool = JdbcConnectionPool.create("jdbc:h2:file:" + base + ";DB_CLOSE_ON_EXIT=FALSE;TRACE_LEVEL_FILE=0",
+                "coilbook", "");
+        try (Connection connection = pool.getConnection(); Statement statement = connection.createStatement()) {
+            connection.setAutoCommit(false);
+            for (int round = 0; round < 3; round++) {
+                int first = 1_000_000 + round * 20_000;
+                statement.execute("insert into customer (row_id, version_id, row_key, code, seq_from) select x, x, 'U' || x, 'U' || x, 99"
+                        + " from system_range(" + first + ", " + (first + 19_999) + ")");
+                if (round == 1) {
+                    statement.execute("update line set seq_to = 99");
+                    statement.execute("update site set seq_to = 99");
+                }
+                statement.execute("checkpoint sync");
+            }
+            Files.copy(data(), folder.resolve("as-killed"));
+            connection.rollback();
+        }
+        pool.dispose();
+        Files.move(folder.resolve("as-killed"), data(), StandardCopyOption.REPLACE_EXISTING);
+        FileInspection.check(data(), "COILBOOK_REGISTER");
+        try (Register register = FleetFixture.registers().open(base, OpenMode.EXISTING)) {
+            int[] customers = new int[1];
+            register.read(Kind.of(Customer.class), customer -> {
+                assertFalse(customer.code().startsWith("U"), customer.code());
+                customers[0]++;
+            });
+            assertTrue(customers[0] > 0, "what was acknowledged is there");
+        }
     }
 }

@@ -132,6 +132,18 @@ public final class FileInspection {
     }
 
     /**
+     * The log of a long transaction names its maps by number; beyond its first page the database finds only those that are open already, and takes
+     * the rest for damage.
+     */
+    private static void openChangedMaps(MVStore store, Transaction transaction) {
+        for (String name : store.getMapNames()) {
+            if (!name.startsWith(TransactionStore.UNDO_LOG_NAME_PREFIX) && !TYPES.equals(name) && !PREPARED.equals(name)) {
+                transaction.openMap(name);
+            }
+        }
+    }
+
+    /**
      * What a killed process left unfinished is completed or taken back on connecting. We never change the schema of a register in place, so an
      * unfinished transaction that touches it is not ours.
      */
@@ -143,6 +155,7 @@ public final class FileInspection {
         TransactionStore transactions = new TransactionStore(store, new MetaType<>(null, null), StringDataType.INSTANCE, 1000);
         transactions.init();
         for (Transaction transaction : transactions.getOpenTransactions()) {
+            openChangedMaps(store, transaction);
             for (Iterator<TransactionStore.Change> changes = transaction.getChanges(0); changes.hasNext();) {
                 TransactionStore.Change change = changes.next();
                 if (change != null && (SCHEMA.equals(change.mapName) || TYPES.equals(change.mapName))) {
