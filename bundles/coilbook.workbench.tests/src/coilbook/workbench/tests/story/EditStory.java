@@ -93,6 +93,7 @@ public final class EditStory implements Story {
         Session session = window.service(Session.class);
         window.await("the register is shown", () -> session.station() != null && GridUser.row(grid, plan.station) > 0, () -> codes(grid));
         StyledText why = window.get(() -> WindowRun.find(grid.getShell(), StyledText.class));
+        window.idle();
         try (Latency latency = new Latency(window.display())) {
             int row = window.get(() -> GridUser.row(grid, plan.station));
             GridUser.click(window, grid, 1, row);

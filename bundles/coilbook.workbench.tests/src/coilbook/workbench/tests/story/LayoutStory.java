@@ -8,16 +8,18 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 
-import org.eclipse.core.runtime.jobs.Job;
 import org.eclipse.e4.core.contexts.IEclipseContext;
 import org.eclipse.e4.ui.css.swt.theme.IThemeEngine;
 import org.eclipse.nebula.widgets.nattable.NatTable;
+import org.eclipse.nebula.widgets.nattable.selection.command.SelectRowsCommand;
+import org.eclipse.nebula.widgets.nattable.viewport.command.ShowColumnInViewportCommand;
+import org.eclipse.nebula.widgets.nattable.viewport.command.ShowRowInViewportCommand;
 import org.eclipse.swt.graphics.Rectangle;
 import org.eclipse.swt.widgets.Shell;
 import coilbook.register.StatusColumn;
+import coilbook.workbench.internal.grid.data.StationColumns;
 import coilbook.workbench.internal.model.FleetWork;
 import coilbook.workbench.internal.model.Session;
-import coilbook.workbench.internal.window.JobBackground;
 import coilbook.workbench.internal.window.Look;
 import coilbook.workbench.tests.support.LayoutWalker;
 import coilbook.workbench.tests.support.WindowRun;
@@ -44,6 +46,8 @@ public final class LayoutStory implements Story {
     @Override
     public void play(WindowRun window) throws Exception {
         walk(window);
+        NatTable grid = window.grid();
+        assertEquals("Filter", window.get(() -> grid.getDataValueByPosition(0, 1)), "the filter row says what it is");
         assertTrue(looked > 200, "only " + looked + " controls were looked at");
         assertEquals(List.of(), faults);
     }
@@ -65,6 +69,9 @@ public final class LayoutStory implements Story {
             window.await("the demo fleet is open", () -> session.fleet() != null && session.station() != null, faults::toString);
             select(window, grid, session);
             picture(window, name + "demo");
+            window.run(() -> grid.doCommand(new ShowColumnInViewportCommand(StatusColumn.HOLD_CURRENT.ordinal() - StationColumns.FROZEN)));
+            picture(window, name + "demo-electrics");
+            window.run(() -> grid.doCommand(new ShowColumnInViewportCommand(0)));
             window.run(() -> shell.setSize(1000, 700));
             picture(window, name + "demo-small");
             window.run(() -> shell.setSize(1400, 880));
@@ -79,28 +86,21 @@ public final class LayoutStory implements Story {
 
     /** The first station with the worst verdict, by sorting as a person would. */
     private static void select(WindowRun window, NatTable grid, Session session) throws Exception {
-        idle(window);
+        window.idle();
         String before = window.get(session::station);
         window.run(() -> grid.doCommand(new org.eclipse.nebula.widgets.nattable.sort.command.SortColumnCommand(grid,
                 StatusColumn.HAZARDS.ordinal() + 1, false, org.eclipse.nebula.widgets.nattable.sort.SortDirectionEnum.DESC)));
-        idle(window);
+        window.idle();
+        window.run(() -> grid.doCommand(new ShowRowInViewportCommand(0)));
+        window.idle();
         window.run(() -> grid
-                .doCommand(new org.eclipse.nebula.widgets.nattable.selection.command.SelectRowsCommand(grid, 1, 2, false, false)));
-        idle(window);
+                .doCommand(new SelectRowsCommand(grid, 1, 2, false, false)));
+        window.idle();
         window.await("another station may be selected", () -> session.station() != null, () -> before);
     }
 
-    private static void idle(WindowRun window) throws InterruptedException {
-        for (int i = 0; i < 3; i++) {
-            window.await("the work is done", () -> Job.getJobManager().find(JobBackground.class).length == 0);
-            window.run(() -> {
-                // whatever the work told the window is done before this
-            });
-        }
-    }
-
     private void picture(WindowRun window, String name) throws Exception {
-        idle(window);
+        window.idle();
         Shell shell = window.shell();
         window.run(() -> {
             shell.forceActive();
@@ -110,7 +110,7 @@ public final class LayoutStory implements Story {
             shell.redraw();
             shell.update();
         });
-        idle(window);
+        window.idle();
         if (!FOLDER.equals(NONE)) {
             Files.createDirectories(Path.of(FOLDER));
             Rectangle bounds = window.get(shell::getBounds);

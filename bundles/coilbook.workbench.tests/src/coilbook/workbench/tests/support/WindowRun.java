@@ -8,6 +8,7 @@ import java.util.function.BooleanSupplier;
 import java.util.function.Supplier;
 
 import org.eclipse.core.runtime.Platform;
+import org.eclipse.core.runtime.jobs.Job;
 import org.eclipse.e4.core.contexts.IEclipseContext;
 import org.eclipse.e4.ui.model.application.ui.basic.MWindow;
 import org.eclipse.equinox.app.IApplication;
@@ -27,6 +28,7 @@ import org.osgi.framework.FrameworkUtil;
 import org.osgi.framework.ServiceRegistration;
 
 import coilbook.workbench.internal.model.Fleets;
+import coilbook.workbench.internal.window.JobBackground;
 
 /** Runs the whole application on the main thread while a second thread plays the user. */
 public final class WindowRun {
@@ -37,7 +39,7 @@ public final class WindowRun {
         void play(WindowRun window) throws Exception;
     }
 
-    private static final long PATIENCE_MS = 60_000;
+    private static final long PATIENCE_MS = 180_000;
 
     private final Display display;
 
@@ -125,6 +127,16 @@ public final class WindowRun {
                 throw new AssertionError("waited in vain until " + what + "; there was: " + get(instead));
             }
             Thread.sleep(20);
+        }
+    }
+
+    /** Waits until no work is under way and what it told the window is done. */
+    public void idle() throws InterruptedException {
+        for (int i = 0; i < 3; i++) {
+            await("the work is done", () -> Job.getJobManager().find(JobBackground.class).length == 0);
+            run(() -> {
+                // whatever the work told the window is done before this
+            });
         }
     }
 

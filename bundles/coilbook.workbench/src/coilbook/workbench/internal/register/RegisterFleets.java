@@ -1,7 +1,5 @@
 package coilbook.workbench.internal.register;
 
-import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 
 import org.osgi.service.component.annotations.Activate;
@@ -67,19 +65,8 @@ public final class RegisterFleets implements Fleets {
 
     @Override
     public FleetModel open(Path base, boolean create, Progress progress) throws CoilbookException {
-        if (create) {
-            makeFolder(base);
-        }
         Register register = registers.open(base, create ? OpenMode.CREATE_IF_MISSING : OpenMode.EXISTING);
         return model(register, register.name());
-    }
-
-    private static void makeFolder(Path base) throws CoilbookException {
-        try {
-            Files.createDirectories(base.toAbsolutePath().getParent());
-        } catch (IOException e) {
-            throw new CoilbookException(CoilbookException.Reason.REGISTER, "The folder of " + base + " cannot be made.", e);
-        }
     }
 
     /** In memory, so that looking around leaves nothing behind and every visit begins with the same data. */

@@ -14,18 +14,28 @@ final class RowCache {
     private record Entry(StatusRow row, long age) {
     }
 
+    /** Forgets the row that was looked at longest ago. */
+    private static final class Recent extends LinkedHashMap<Long, Entry> {
+
+        private static final long serialVersionUID = 1L;
+        private final int capacity;
+
+        Recent(int capacity) {
+            super(1024, 0.75f, true);
+            this.capacity = capacity;
+        }
+
+        @Override
+        protected boolean removeEldestEntry(Map.Entry<Long, Entry> eldest) {
+            return size() > capacity;
+        }
+    }
+
     private final Map<Long, Entry> rows;
     private long age;
 
     RowCache(int capacity) {
-        rows = new LinkedHashMap<>(1024, 0.75f, true) {
-            private static final long serialVersionUID = 1L;
-
-            @Override
-            protected boolean removeEldestEntry(Map.Entry<Long, Entry> eldest) {
-                return size() > capacity;
-            }
-        };
+        rows = new Recent(capacity);
     }
 
     /** The row, perhaps of before the last change; {@code null} if it has to be fetched. */

@@ -185,10 +185,11 @@ public final class StationsPresenter implements Session.Listener {
         filters.clear();
         sorts = List.of();
         selected = -1;
+        selectedCount = 0;
+        total = 0;
         view.rowsReplaced(-1);
         view.notice(null);
         if (session.fleet() == null) {
-            total = 0;
             view.welcome(true);
         } else {
             load();

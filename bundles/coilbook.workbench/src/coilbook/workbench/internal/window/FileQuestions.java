@@ -55,8 +55,8 @@ public final class FileQuestions {
 
     /** The base path of a register from the name of its file. */
     static Path base(Path file) {
-        String name = file.getFileName().toString();
-        return name.endsWith(REGISTER_SUFFIX) ? file.resolveSibling(name.substring(0, name.length() - REGISTER_SUFFIX.length())) : file;
+        String name = file.toString();
+        return name.endsWith(REGISTER_SUFFIX) ? Path.of(name.substring(0, name.length() - REGISTER_SUFFIX.length())) : file;
     }
 
     /** Opens the demo fleet. */

@@ -98,7 +98,7 @@ public final class PageDialog extends Dialog {
             for (int i = 0; i < parts.length; i++) {
                 int start = out.length();
                 out.append(parts[i]);
-                if (i % 2 == 1) {
+                if (i % 2 != 0) {
                     bold.add(new int[] { start, parts[i].length() });
                 }
             }

@@ -59,9 +59,12 @@ public final class WindowState {
         if (file == null) {
             return;
         }
-        Path fresh = file.resolveSibling(file.getFileName() + ".new");
+        Path fresh = Path.of(file + ".new");
         try {
-            Files.createDirectories(file.toAbsolutePath().getParent());
+            Path folder = file.toAbsolutePath().getParent();
+            if (folder != null) {
+                Files.createDirectories(folder);
+            }
             try (Writer out = Files.newBufferedWriter(fresh, StandardCharsets.UTF_8)) {
                 values.store(out, null);
             }

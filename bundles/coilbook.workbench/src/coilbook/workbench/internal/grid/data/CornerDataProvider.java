@@ -2,10 +2,8 @@ package coilbook.workbench.internal.grid.data;
 
 import org.eclipse.nebula.widgets.nattable.data.IDataProvider;
 
-/** The corner over the row numbers: blank beside the headings, and beside the filter row the word that says what that row is. */
+/** The corner over the row numbers, one cell beside headings and filter row: the word at its foot says what the filter row is. */
 public final class CornerDataProvider implements IDataProvider {
-
-    private static final int ROWS = 2;
 
     private final String filter;
 
@@ -15,7 +13,7 @@ public final class CornerDataProvider implements IDataProvider {
 
     @Override
     public Object getDataValue(int columnIndex, int rowIndex) {
-        return rowIndex == 0 ? "" : filter;
+        return filter;
     }
 
     @Override
@@ -30,6 +28,6 @@ public final class CornerDataProvider implements IDataProvider {
 
     @Override
     public int getRowCount() {
-        return ROWS;
+        return 1;
     }
 }

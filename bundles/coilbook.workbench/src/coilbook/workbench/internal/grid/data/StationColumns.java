@@ -31,7 +31,7 @@ public final class StationColumns {
             case PROVENANCE -> 140;
             case LINE, TAG, COUNTRY -> 80;
             case COIL_SERIAL, DRIVER_SERIAL -> 110;
-            case WINDING_READING -> 210;
+            case WINDING_READING -> 230;
             default -> CellText.isNumeric(column) ? Math.max(90, 30 + 8 * new CellText().heading(column).length()) : 120;
         };
     }

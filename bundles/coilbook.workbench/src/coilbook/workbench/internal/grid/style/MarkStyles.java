@@ -20,6 +20,8 @@ import coilbook.workbench.internal.stations.VerdictMark;
 public final class MarkStyles implements IThemeExtension {
 
     private static final int PADDING = 4;
+    /** The height of the headings, beside which the corner's word does not stand. */
+    private static final int HEADING = 26;
 
     private final GridColours colours;
     private final Font bold;
@@ -52,7 +54,8 @@ public final class MarkStyles implements IThemeExtension {
     }
 
     private static void painters(IConfigRegistry registry) {
-        registry.registerConfigAttribute(CellConfigAttributes.CELL_PAINTER, new PaddingDecorator(new TextPainter(), 0, PADDING, 0, PADDING),
+        registry.registerConfigAttribute(CellConfigAttributes.CELL_PAINTER,
+                new PaddingDecorator(new TextPainter(), HEADING, PADDING, 0, PADDING),
                 DisplayMode.NORMAL, GridRegion.CORNER);
     }
 
