@@ -69,11 +69,21 @@ public final class Console {
     }
 
     private int usage(CommandLine.ParameterException problem, String[] arguments) {
-        terminal.tell("coilbook: " + problem.getMessage());
+        terminal.tell("coilbook: " + words(problem));
         CommandLine.UnmatchedArgumentException.printSuggestions(problem, problem.getCommandLine().getErr());
         String name = problem.getCommandLine().getCommandSpec().qualifiedName(" ");
         terminal.tell("Run \"" + name + " --help\" for what it takes.");
         return ExitCode.USAGE;
+    }
+
+    /** An unknown word in our own terms; the library's message speaks of argument indexes. */
+    private static String words(CommandLine.ParameterException problem) {
+        if (problem instanceof CommandLine.UnmatchedArgumentException unmatched && !unmatched.getUnmatched().isEmpty()) {
+            String first = unmatched.getUnmatched().get(0);
+            boolean atTop = problem.getCommandLine().getParent() == null;
+            return (first.startsWith("-") ? "unknown option " : atTop ? "unknown command " : "unexpected word ") + first;
+        }
+        return problem.getMessage();
     }
 
     private int failed(Exception problem) {

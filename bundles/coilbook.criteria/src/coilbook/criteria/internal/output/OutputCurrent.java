@@ -15,6 +15,7 @@ import coilbook.criteria.internal.Shown;
 import coilbook.criteria.internal.station.Fact;
 import coilbook.criteria.internal.station.Names;
 import coilbook.criteria.internal.station.StationData;
+import coilbook.criteria.internal.station.WindingResistance;
 import coilbook.electrics.Data;
 import coilbook.electrics.Derived;
 import coilbook.electrics.StationCircuit;
@@ -90,6 +91,14 @@ public final class OutputCurrent extends ElectricCriterion {
                 List.of(), open);
     }
 
+    /** Where the least resistance comes from: a reading without its uncertainty keeps the type's tolerance. */
+    private static String from(StationView station) {
+        WindingResistance winding = WindingResistance.of(station);
+        String spread = " less " + Shown.of(winding.tolerance().value(), Unit.PERCENT);
+        return winding.measured() ? "read " + Shown.of(winding.resistance20().value(), Unit.OHM) + spread
+                : "catalogue " + Shown.of(winding.resistance20().value(), Unit.OHM) + spread;
+    }
+
     private Finding load(StationView station, StationData data, Fact lowest) {
         Fact resistance = data.fact(Data.COIL_RESISTANCE).map(r -> data.circuit().coil().lowestResistance20());
         Judgement judgement = judgement().restsOn(Fact.weakest(resistance, lowest)).compared(resistance.value(), lowest.value(), Unit.OHM)
@@ -97,7 +106,7 @@ public final class OutputCurrent extends ElectricCriterion {
         if (!resistance.isKnown()) {
             return judgement.undetermined(resistance.missing());
         }
-        String sentence = "The coil is " + Shown.of(resistance.value(), Unit.OHM) + " at 20 °C and at the low end of its tolerance"
+        String sentence = "The coil can be as low as " + Shown.of(resistance.value(), Unit.OHM) + " at 20 °C (" + from(station) + ")"
                 + data.channel().words() + "; the driver’s lowest load is " + Shown.beside(lowest.value(), resistance.value(), Unit.OHM)
                 + source(lowest.provenance());
         return judgement.is(Compare.floor(resistance.value(), lowest.value(), station.fleetSettings().get(FleetSettings.MARGIN)), sentence);
