@@ -66,6 +66,22 @@ class ThreadTest {
     }
 
     @Test
+    void anAuditComesBackWithoutChangingARowAndAPastOneIsRefused() {
+        assertEquals(0, Run.in(folder, files("import", "--register", "one")).code());
+        assertEquals(0, Run.in(folder, "audit", "--register", "one", "--out", "one.xlsx").code());
+        JsonNode back = Run.in(folder, "import", "one.xlsx", "--register", "one", "--json").json();
+        assertEquals(back.get("read").asInt(), back.get("unchanged").asInt(), back::toString);
+        Run elsewhere = Run.in(folder, "import", "one.xlsx", "--register", "two");
+        assertEquals(0, elsewhere.code(), elsewhere::toString);
+        assertEquals(Run.in(folder, "check", "--register", "one", "--json").out(),
+                Run.in(folder, "check", "--register", "two", "--json").out());
+        assertEquals(0, Run.in(folder, "audit", "--register", "one", "--out", "past.xlsx", "--as-of", "2026-06-30").code());
+        Run past = Run.in(folder, "import", "past.xlsx", "--register", "two");
+        assertEquals(3, past.code(), past::toString);
+        assertTrue(past.err().contains("past date"), past::toString);
+    }
+
+    @Test
     void checkKeepsItsSchemaItsOrderAndItsBytes() {
         assertEquals(0, Run.in(folder, "demo", "--register", "fleet", "--stations", "200", "--seed", "7").code());
         Run check = Run.in(folder, "check", "--register", "fleet", "--json", "--remedies");

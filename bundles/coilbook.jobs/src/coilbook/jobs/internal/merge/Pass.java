@@ -17,7 +17,6 @@ import coilbook.fleet.FieldText;
 import coilbook.fleet.InputProblem;
 import coilbook.fleet.InvalidValue;
 import coilbook.fleet.Kind;
-import coilbook.fleet.Row;
 import coilbook.fleet.Station;
 import coilbook.fleet.Supply;
 
