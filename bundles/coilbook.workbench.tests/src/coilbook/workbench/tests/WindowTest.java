@@ -21,6 +21,7 @@ import coilbook.workbench.tests.story.ErrorsStory;
 import coilbook.workbench.tests.story.LargeFleetStory;
 import coilbook.workbench.tests.story.LayoutStory;
 import coilbook.workbench.tests.story.RefusedStory;
+import coilbook.workbench.tests.story.SortFilterStory;
 import coilbook.workbench.tests.story.Story;
 import coilbook.workbench.tests.support.Services;
 import coilbook.workbench.tests.support.WindowRun;
@@ -35,7 +36,8 @@ class WindowTest {
     Stream<DynamicTest> stories() throws Exception {
         Path base = folder.resolve("fleet");
         EditStory edit = EditStory.prepare(base);
-        List<Story> stories = List.of(edit, new RefusedStory(), new ErrorsStory(), new LargeFleetStory(), new LayoutStory());
+        List<Story> stories = List.of(edit, new RefusedStory(), new SortFilterStory(), new ErrorsStory(), new LargeFleetStory(),
+                new LayoutStory());
         Map<Story, Throwable> failures = new LinkedHashMap<>();
         WindowRun.run(new StoryFleets(Services.get(Fleets.class), folder), window -> {
             NatTable grid = window.grid();

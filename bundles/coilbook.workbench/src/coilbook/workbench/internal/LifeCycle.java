@@ -45,6 +45,7 @@ public final class LifeCycle {
         FleetWork work = new FleetWork(session, fleets, background);
         Look look = new Look(session, state);
         look.begin();
+        session.opening(work.hasRegister());
         context.set(IEventLoopAdvisor.class, new EventLoop(errors));
         context.set(Session.class, session);
         context.set(RunningWork.class, running);

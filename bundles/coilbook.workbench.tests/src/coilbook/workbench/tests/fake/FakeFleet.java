@@ -200,7 +200,8 @@ public final class FakeFleet implements FleetModel {
 
     @Override
     public synchronized Steps steps() {
-        return new Steps(done.isEmpty() ? null : words(done.peek()), undone.isEmpty() ? null : words(undone.peek()));
+        return new Steps(done.isEmpty() ? null : words(done.peek()), done.isEmpty() ? 0 : 1,
+                undone.isEmpty() ? null : words(undone.peek()));
     }
 
     private String words(Step step) {

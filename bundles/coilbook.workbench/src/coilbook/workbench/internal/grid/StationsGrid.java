@@ -87,7 +87,8 @@ public final class StationsGrid {
         body = new DataLayer(cells, 110, ROW_HEIGHT);
         widths(body);
         body.setConfigLabelAccumulator(labels(new CellLabels(rows)));
-        selection = new SelectionLayer(body);
+        selection = new SelectionLayer(body, false);
+        selection.addConfiguration(new SelectionConfiguration());
         ViewportLayer viewport = new ViewportLayer(selection);
         FreezeLayer freeze = new FreezeLayer(selection);
         CompositeFreezeLayer centre = new CompositeFreezeLayer(freeze, viewport, selection);

@@ -2,9 +2,12 @@ package coilbook.workbench.internal.handlers;
 
 import org.eclipse.e4.core.di.annotations.CanExecute;
 import org.eclipse.e4.core.di.annotations.Execute;
+import org.eclipse.e4.ui.services.IServiceConstants;
+import org.eclipse.swt.widgets.Shell;
 
 import coilbook.workbench.internal.model.Session;
 import coilbook.workbench.internal.window.FileQuestions;
+import jakarta.inject.Named;
 
 /** Edit › Undo. */
 public final class UndoHandler {
@@ -15,7 +18,7 @@ public final class UndoHandler {
     }
 
     @Execute
-    void execute(FileQuestions questions) {
-        questions.undo();
+    void execute(@Named(IServiceConstants.ACTIVE_SHELL) Shell shell, FileQuestions questions) {
+        questions.undo(shell);
     }
 }

@@ -48,6 +48,7 @@ public final class FleetWork {
     }
 
     private void replace(String name, Background.Task<FleetModel> opening, Runnable then, Consumer<CoilbookException> failed) {
+        session.opening(true);
         background.start(name, Background.Lane.LONG, progress -> {
             FleetModel opened = opening.run(progress);
             try {
@@ -63,7 +64,10 @@ public final class FleetWork {
             readSteps();
             close(before);
             then.run();
-        }, failed);
+        }, error -> {
+            session.opening(false);
+            failed.accept(error);
+        });
     }
 
     private void close(FleetModel model) {

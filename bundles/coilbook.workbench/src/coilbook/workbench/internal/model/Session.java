@@ -18,6 +18,10 @@ public final class Session {
         default void fleetChanged() {
         }
 
+        /** A fleet is about to be shown, or will not be. */
+        default void openingChanged() {
+        }
+
         /** Another part of the fleet is looked at. */
         default void scopeChanged() {
         }
@@ -45,6 +49,7 @@ public final class Session {
     private String station;
     private Steps steps = Steps.NONE;
     private boolean dark;
+    private boolean opening;
 
     /** Adds a listener. */
     public void add(Listener listener) {
@@ -67,9 +72,23 @@ public final class Session {
         scope = FleetScope.all();
         station = null;
         steps = Steps.NONE;
+        opening = false;
         tell(Listener::fleetChanged);
         tell(Listener::stationChanged);
         tell(Listener::stepsChanged);
+    }
+
+    /** Whether a fleet is about to be shown, so that nothing else need be offered meanwhile. */
+    public boolean isOpening() {
+        return opening;
+    }
+
+    /** Says that a fleet is about to be shown, or that it will not be. */
+    public void opening(boolean isOpening) {
+        if (opening != isOpening) {
+            opening = isOpening;
+            tell(Listener::openingChanged);
+        }
     }
 
     public FleetScope scope() {

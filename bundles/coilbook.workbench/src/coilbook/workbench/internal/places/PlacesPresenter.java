@@ -2,7 +2,6 @@ package coilbook.workbench.internal.places;
 
 import java.util.List;
 
-import coilbook.register.FleetScope;
 import coilbook.register.Status;
 import coilbook.workbench.internal.model.Background;
 import coilbook.workbench.internal.model.FleetModel;
@@ -70,6 +69,23 @@ public final class PlacesPresenter implements Session.Listener {
         view.look(session.isDark());
     }
 
+    /** The sum over the sites: asking the register for it would read every row once more. */
+    private static Status.Counts total(List<Status.Place> places) {
+        long[] sums = new long[6];
+        for (Status.Place place : places) {
+            if (place.site() != null && place.line() == null) {
+                Status.Counts counts = place.counts();
+                sums[0] += counts.stations();
+                sums[1] += counts.hazards();
+                sums[2] += counts.nonconformities();
+                sums[3] += counts.observations();
+                sums[4] += counts.undetermined();
+                sums[5] += counts.conceded();
+            }
+        }
+        return new Status.Counts(sums[0], sums[1], sums[2], sums[3], sums[4], sums[5]);
+    }
+
     private void read() {
         reading.cancel();
         FleetModel fleet = session.fleet();
@@ -77,11 +93,8 @@ public final class PlacesPresenter implements Session.Listener {
             view.show(null);
             return;
         }
-        record Answer(List<Status.Place> places, Status.Counts total) {
-        }
-        reading = background.start(texts.get("reading"), Background.Lane.READ,
-                progress -> new Answer(fleet.places(), fleet.counts(FleetScope.all())),
-                answer -> view.show(PlaceNode.tree(answer.places, answer.total, texts.get("all"), texts.get("nobody"))),
+        reading = background.start(texts.get("reading"), Background.Lane.READ, progress -> fleet.places(),
+                places -> view.show(PlaceNode.tree(places, total(places), texts.get("all"), texts.get("nobody"))),
                 error -> view.failed(error.getMessage()));
     }
 }

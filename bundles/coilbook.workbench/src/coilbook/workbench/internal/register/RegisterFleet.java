@@ -113,7 +113,7 @@ final class RegisterFleet implements FleetModel {
     @Override
     public Steps steps() throws CoilbookException {
         JournalEntry undo = session.undoable();
-        return new Steps(undo == null ? null : undo.why(), session.redoable());
+        return new Steps(undo == null ? null : undo.why(), undo == null ? 0 : undo.rows(), session.redoable());
     }
 
     @Override

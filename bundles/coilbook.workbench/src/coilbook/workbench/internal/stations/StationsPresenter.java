@@ -9,6 +9,7 @@ import java.util.List;
 import java.util.Map;
 
 import coilbook.fleet.CoilbookException;
+import coilbook.register.FleetScope;
 import coilbook.register.StatusColumn;
 import coilbook.register.StatusQuery;
 import coilbook.register.StatusRow;
@@ -60,6 +61,7 @@ public final class StationsPresenter implements Session.Listener {
     private View view;
     private long[] ids = {};
     private long total;
+    private FleetScope counted;
     private Background.Handle query = () -> {
     };
     private boolean fetching;
@@ -187,12 +189,21 @@ public final class StationsPresenter implements Session.Listener {
         selected = -1;
         selectedCount = 0;
         total = 0;
+        counted = null;
         view.rowsReplaced(-1);
         view.notice(null);
         if (session.fleet() == null) {
-            view.welcome(true);
+            view.welcome(!session.isOpening());
         } else {
+            view.welcome(false);
             load();
+        }
+    }
+
+    @Override
+    public void openingChanged() {
+        if (session.fleet() == null) {
+            view.welcome(!session.isOpening());
         }
     }
 
@@ -204,6 +215,7 @@ public final class StationsPresenter implements Session.Listener {
     @Override
     public void dataChanged() {
         cache.touch();
+        counted = null;
         if (ids.length == 0) {
             load();
         } else {
@@ -221,13 +233,20 @@ public final class StationsPresenter implements Session.Listener {
         List<StatusQuery.Filter> conditions = new ArrayList<>();
         filters.forEach((column, expression) -> conditions.add(new StatusQuery.Filter(column, expression)));
         StatusQuery asked = new StatusQuery(session.scope(), conditions, sorts);
+        FleetScope scope = asked.scope();
+        boolean filtered = !conditions.isEmpty();
+        long known = scope.equals(counted) ? total : -1;
         record Answer(long[] ids, long total) {
         }
         query = background.start(texts.get("ordering"), Background.Lane.READ,
-                progress -> new Answer(fleet.ids(asked), fleet.counts(asked.scope()).stations()), answer -> {
+                progress -> {
+                    long[] found = fleet.ids(asked);
+                    return new Answer(found, !filtered ? found.length : known >= 0 ? known : fleet.counts(scope).stations());
+                }, answer -> {
                     long before = selected >= 0 && selected < ids.length ? ids[selected] : -1;
                     ids = answer.ids;
                     total = answer.total;
+                    counted = scope;
                     wanted.clear();
                     view.notice(null);
                     view.welcome(total == 0 && asked.scope().isAll());

@@ -145,6 +145,9 @@ public final class WaveformPresenter implements Session.Listener {
             view.showWords(texts.get("nothing"));
             return;
         }
+        if (report == null) {
+            view.showWords(texts.get("computing"));
+        }
         work = background.start(texts.get("computing"), Background.Lane.READ, progress -> fleet.waveform(station, corner), found -> {
             report = found;
             if (found == null || found.plot() == null) {

@@ -16,11 +16,14 @@ import coilbook.fleet.InputProblem;
 import coilbook.workbench.internal.model.BroughtIn;
 import coilbook.workbench.internal.model.FleetWork;
 import coilbook.workbench.internal.model.Session;
+import coilbook.workbench.internal.model.Steps;
 import coilbook.workbench.internal.text.Texts;
 
 /** Asks for files, hands them to the fleet's work, and tells what came of it. */
 public final class FileQuestions {
 
+    /** One cell can change a few rows; an import changes hundreds, and one keystroke must not take it away unasked. */
+    private static final int ROWS_WITHOUT_ASKING = 20;
     private static final String REGISTER_SUFFIX = ".mv.db";
 
     private final Session session;
@@ -126,8 +129,13 @@ public final class FileQuestions {
         }, this::failed);
     }
 
-    /** Takes the latest step back. */
-    public void undo() {
+    /** Takes the latest step back; a large one, such as an import, only if that is really meant. */
+    public void undo(Shell shell) {
+        Steps steps = session.steps();
+        if (steps.undoRows() > ROWS_WITHOUT_ASKING
+                && !MessageDialog.openQuestion(shell, texts.get("undo.none"), texts.get("undo.sure", steps.undo(), steps.undoRows()))) {
+            return;
+        }
         work.undo(this::failed);
     }
 

@@ -7,7 +7,7 @@ import org.eclipse.nebula.widgets.nattable.sort.event.ColumnHeaderClickEventMatc
 import org.eclipse.nebula.widgets.nattable.ui.binding.UiBindingRegistry;
 import org.eclipse.swt.SWT;
 
-/** A click on a heading sorts, with Ctrl it sorts by one more column. */
+/** A click on a heading sorts, with Ctrl it sorts by one more column. These come before the bindings that select a whole column. */
 public final class SortBindings extends AbstractRegistryConfiguration {
 
     @Override
@@ -17,7 +17,7 @@ public final class SortBindings extends AbstractRegistryConfiguration {
 
     @Override
     public void configureUiBindings(UiBindingRegistry bindings) {
-        bindings.registerSingleClickBinding(new ColumnHeaderClickEventMatcher(SWT.NONE, 1), new SortColumnAction(false));
-        bindings.registerSingleClickBinding(new ColumnHeaderClickEventMatcher(SWT.MOD1, 1), new SortColumnAction(true));
+        bindings.registerFirstSingleClickBinding(new ColumnHeaderClickEventMatcher(SWT.NONE, 1), new SortColumnAction(false));
+        bindings.registerFirstSingleClickBinding(new ColumnHeaderClickEventMatcher(SWT.MOD1, 1), new SortColumnAction(true));
     }
 }
