@@ -115,7 +115,7 @@ build() {
 # install_product: takes what was just built as the product to start. A running process keeps the files it started from.
 install_product() {
   local built stamp old
-  built=$(echo "$root"/releng/coilbook.product/target/products/coilbook.product/*/*/*/coilbook)
+  built=$root/releng/coilbook.product/target/products/coilbook.product/linux/gtk/$(uname -m)/coilbook
   [ -x "$built/coilbook" ] || fail "the build left no product at $built"
   stamp=$(date +%Y%m%d-%H%M%S)-$$
   cp -R "$built" "$product_home/$stamp" || fail "cannot write $product_home/$stamp"
