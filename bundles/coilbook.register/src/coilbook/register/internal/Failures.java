@@ -2,6 +2,7 @@ package coilbook.register.internal;
 
 import java.io.IOException;
 import java.sql.SQLException;
+import java.util.List;
 
 import org.h2.mvstore.MVStoreException;
 import org.jooq.exception.DataAccessException;
@@ -12,6 +13,8 @@ import coilbook.fleet.CoilbookException.Reason;
 /** Turns what the database library throws into words for a person. */
 final class Failures {
 
+    /** What systems say when a disk, a quota or a file's size limit is used up. */
+    private static final List<String> FULL = List.of("No space left", "not enough space", "Disk quota", "File too large");
     private static final int IN_USE = 90020;
     private static final int WRONG_USER = 28000;
     private static final int MISSING = 90146;
@@ -45,8 +48,7 @@ final class Failures {
     private static String words(String register, Exception failure) {
         for (Throwable cause = failure; cause != null; cause = cause.getCause()) {
             String message = String.valueOf(cause.getMessage());
-            if (cause instanceof IOException && (message.contains("No space left") || message.contains("not enough space")
-                    || message.contains("Disk quota"))) {
+            if (cause instanceof IOException && FULL.stream().anyMatch(message::contains)) {
                 return "The disk is full. The register " + register + " holds what was recorded before; nothing of this step was kept.";
             } else if (cause instanceof SQLException sql && sql.getErrorCode() == IN_USE) {
                 return register + " is in use.";

@@ -24,6 +24,7 @@ import coilbook.fleet.RowChange;
 import coilbook.register.OpenMode;
 import coilbook.register.Register;
 import coilbook.register.Registers;
+import coilbook.register.internal.file.DiskRoom;
 import coilbook.register.internal.file.FileInspection;
 import coilbook.register.internal.file.Folders;
 import coilbook.register.internal.file.LockNote;
@@ -91,7 +92,7 @@ public final class H2Registers implements Registers {
             } catch (IOException e) {
                 throw new IllegalStateException(e);
             }
-            Parts parts = new Parts(data, state.registerId());
+            Parts parts = new Parts(data, state.registerId(), RegisterStore.Room.ENDLESS);
             seed(parts.store());
             Truth truth = parts.truth();
             LiveStatus status = new LiveStatus(truth, view, judging, new StoredRegister.InWords(name));
@@ -111,10 +112,10 @@ public final class H2Registers implements Registers {
         private final Journal journal = new Journal();
         private final RegisterStore store;
 
-        Parts(Database data, String registerId) throws SQLException {
+        Parts(Database data, String registerId, RegisterStore.Room room) throws SQLException {
             this.data = data;
             this.registerId = registerId;
-            this.store = new RegisterStore(data, codecs, journal);
+            this.store = new RegisterStore(data, codecs, journal, room);
         }
 
         RegisterStore store() {
@@ -147,7 +148,7 @@ public final class H2Registers implements Registers {
                         } catch (IOException e) {
                             throw new IllegalStateException(e);
                         }
-                        seed(new RegisterStore(data, new Codecs(), new Journal()));
+                        seed(new RegisterStore(data, new Codecs(), new Journal(), new DiskRoom(path.folder())));
                     }
                     return null;
                 });
@@ -204,7 +205,7 @@ public final class H2Registers implements Registers {
                 migrate(path, connection, state.version());
             }
         }
-        Parts parts = new Parts(data, state.registerId());
+        Parts parts = new Parts(data, state.registerId(), new DiskRoom(path.folder()));
         Truth truth = parts.truth();
         ViewFile view = ViewFile.open(path, truth, judging);
         return new StoredRegister(path.toString(), parts.store(), truth, view.status(), judging, () -> {

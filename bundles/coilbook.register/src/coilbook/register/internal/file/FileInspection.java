@@ -77,6 +77,8 @@ public final class FileInspection {
             throw foreign(file, e);
         } catch (MVStoreException e) {
             throw failed(file, e);
+        } catch (StackOverflowError e) {
+            throw damaged(file, e); // pages that point at each other
         } catch (RuntimeException e) {
             throw e.getCause() instanceof ForeignContent found ? foreign(file, found) : damaged(file, e);
         }
@@ -102,7 +104,7 @@ public final class FileInspection {
         return damaged(file, e);
     }
 
-    private static CoilbookException damaged(Path file, Exception e) {
+    private static CoilbookException damaged(Path file, Throwable e) {
         return new CoilbookException(Reason.REGISTER, file + " is damaged. Restore it from a backup copy.", e);
     }
 
@@ -153,6 +155,9 @@ public final class FileInspection {
             return;
         }
         TransactionStore transactions = new TransactionStore(store, new MetaType<>(null, null), StringDataType.INSTANCE, 1000);
+        // what a transaction did can be read only once the maps it touched are open
+        store.getMapNames().stream().filter(name -> name.startsWith("table.") || name.startsWith("index."))
+                .forEach(name -> transactions.openMap(name, null, null));
         transactions.init();
         for (Transaction transaction : transactions.getOpenTransactions()) {
             openChangedMaps(store, transaction);

@@ -15,7 +15,7 @@ final class SchemaWords {
     private static final Pattern WORD = Pattern.compile("[A-Z_]+");
     private static final Pattern PLAIN = Pattern.compile("[A-Z0-9_(),.\\s]*");
     private static final Pattern TABLE = Pattern.compile("CREATE CACHED TABLE \"PUBLIC\"\\.\"([A-Z0-9_]+)\"\\(");
-    private static final Pattern SETTING = Pattern.compile("SET CREATE_BUILD \\d{1,6}");
+    private static final Pattern SETTING = Pattern.compile("SET (CREATE_BUILD|WRITE_DELAY) \\d{1,6}");
     private static final Pattern USER = Pattern.compile("CREATE USER IF NOT EXISTS \"COILBOOK\" SALT '[0-9a-f]*' HASH '[0-9a-f]*' ADMIN");
     private static final Set<String> TABLE_WORDS = Set.of("CREATE", "CACHED", "TABLE", "NOT", "NULL", "SELECTIVITY", "BIGINT", "INTEGER",
             "SMALLINT",

@@ -41,7 +41,7 @@ final class StatusWriter {
     }
 
     void write(Collection<Line> lines) throws SQLException {
-        inTransaction(connection -> {
+        database.<Void, SQLException>inTransaction(connection -> {
             List<Long> old = lines.stream().filter(Line::known).map(Line::id).toList();
             remove(connection, old);
             try (PreparedStatement status = connection.prepareStatement(insertion(ViewTables.STATUS, ViewTables.statusFields()));
@@ -58,6 +58,7 @@ final class StatusWriter {
                 status.executeBatch();
                 finding.executeBatch();
             }
+            return null;
         });
     }
 
@@ -83,7 +84,10 @@ final class StatusWriter {
     /** Removes rows and their findings. */
     void remove(Collection<Long> ids) throws SQLException {
         if (!ids.isEmpty()) {
-            inTransaction(connection -> remove(connection, ids));
+            database.<Void, SQLException>inTransaction(connection -> {
+                remove(connection, ids);
+                return null;
+            });
         }
     }
 
@@ -113,11 +117,12 @@ final class StatusWriter {
 
     /** Says which state of the register the rows reflect. */
     void reached(long seq, LocalDate day) throws SQLException {
-        inTransaction(connection -> {
+        database.<Void, SQLException>inTransaction(connection -> {
             Database.dsl(connection).deleteFrom(ViewTables.STATE).execute();
             Database.dsl(connection).insertInto(ViewTables.STATE)
                     .columns(ViewTables.VIEW_VERSION, ViewTables.ENGINE, ViewTables.REGISTER_ID, ViewTables.SEQ, ViewTables.STATE_DAY)
                     .values(ViewTables.VERSION, engine, registerId, seq, day).execute();
+            return null;
         });
     }
 
@@ -125,24 +130,5 @@ final class StatusWriter {
         Object[] parameters = new Object[fields.size()];
         Arrays.setAll(parameters, i -> DSL.param("p" + i, fields.get(i)));
         return Database.renderer().insertInto(table).columns(fields).values(parameters).getSQL();
-    }
-
-    private interface Work {
-        void run(Connection connection) throws SQLException;
-    }
-
-    private void inTransaction(Work work) throws SQLException {
-        try (Connection connection = database.connection()) {
-            connection.setAutoCommit(false);
-            try {
-                work.run(connection);
-                connection.commit();
-            } catch (SQLException | RuntimeException e) {
-                connection.rollback();
-                throw e;
-            } finally {
-                connection.setAutoCommit(true);
-            }
-        }
     }
 }

@@ -16,10 +16,22 @@ public final class RegisterStore {
     private final Database database;
     private final Codecs codecs;
     private final Journal journal;
+    private final Room room;
     private JournalEntry last;
 
-    public RegisterStore(Database database, Codecs codecs, Journal journal) throws SQLException {
+    /** Whether there is room for so many more rows. */
+    public interface Room {
+
+        /** Where nothing runs out. */
+        Room ENDLESS = rows -> {
+        };
+
+        void check(int rows) throws CoilbookException;
+    }
+
+    public RegisterStore(Database database, Codecs codecs, Journal journal, Room room) throws SQLException {
         this.database = database;
+        this.room = room;
         this.codecs = codecs;
         this.journal = journal;
         try (Connection connection = database.connection()) {
@@ -67,37 +79,12 @@ public final class RegisterStore {
 
     private long write(Change change, Map<String, Long> identities, long compensates, Progress progress, Recorded recorded)
             throws SQLException, CoilbookException {
-        try (Connection connection = database.connection()) {
-            connection.setAutoCommit(false);
-            JournalEntry entry;
-            try {
-                entry = new ChangeWriter(codecs, journal, connection, change, identities, last, progress).write(compensates);
-                connection.commit();
-            } catch (SQLException | RuntimeException | CoilbookException e) {
-                takeBack(connection, e);
-                throw e;
-            } finally {
-                restore(connection);
-            }
-            Database.forceToDisk(connection);
-            last = entry;
-            recorded.take(entry.seq(), change);
-            return entry.seq();
-        }
-    }
-
-    private static void takeBack(Connection connection, Exception reason) {
-        try {
-            connection.rollback();
-        } catch (SQLException e) {
-            reason.addSuppressed(e);
-        }
-    }
-
-    /** On a database that failed and closed itself this fails too; the first failure is the one to tell. */
-    private static void restore(Connection connection) throws SQLException {
-        if (!connection.isClosed()) {
-            connection.setAutoCommit(true);
-        }
+        room.check(change.rows().size());
+        JournalEntry entry = database.<JournalEntry, CoilbookException>inTransaction(
+                connection -> new ChangeWriter(codecs, journal, connection, change, identities, last, progress).write(compensates));
+        database.forceToDisk();
+        last = entry;
+        recorded.take(entry.seq(), change);
+        return entry.seq();
     }
 }

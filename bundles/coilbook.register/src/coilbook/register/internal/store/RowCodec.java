@@ -6,8 +6,10 @@ import java.sql.PreparedStatement;
 import java.sql.ResultSet;
 import java.sql.SQLException;
 import java.sql.Types;
+import java.time.DateTimeException;
 import java.time.LocalDate;
 import java.time.LocalDateTime;
+import java.time.ZoneId;
 import java.time.temporal.ChronoUnit;
 import java.util.ArrayList;
 import java.util.HashMap;
@@ -18,9 +20,11 @@ import coilbook.fleet.Datum;
 import coilbook.fleet.Field;
 import coilbook.fleet.FieldType;
 import coilbook.fleet.InvalidValue;
+import coilbook.fleet.Kind;
 import coilbook.fleet.Labelled;
 import coilbook.fleet.Provenance;
 import coilbook.fleet.Row;
+import coilbook.fleet.Site;
 
 /**
  * Rows to columns and back. Both ways go through plain JDBC positions, because a fleet is read by the hundred thousand.
@@ -187,11 +191,14 @@ public final class RowCodec<R extends Row> {
     }
 
     /**
-     * Refuses what could be stored only by altering it.
+     * Refuses what could be stored only by altering it, or could not be read as what it is to mean.
      *
      * @throws InvalidValue for the first such value
      */
     void checkStorable(Row row) throws InvalidValue {
+        if (row instanceof Site site && site.timeZone() != null) {
+            checkZone(site.timeZone());
+        }
         for (Field field : fields) {
             Object value = field.get(row);
             if (value instanceof BigDecimal amount && (amount.stripTrailingZeros().scale() > StoredColumn.MONEY_SCALE
@@ -201,6 +208,14 @@ public final class RowCodec<R extends Row> {
             } else if (value instanceof List<?> && ((String) stored(value)).length() > 4000) {
                 throw new InvalidValue(field.heading(), "", "texts of at most 4000 characters together");
             }
+        }
+    }
+
+    private static void checkZone(String zone) throws InvalidValue {
+        try {
+            ZoneId.of(zone);
+        } catch (DateTimeException e) {
+            throw new InvalidValue(Kind.of(Site.class).field("time_zone").heading(), zone, "a time zone such as Europe/Paris");
         }
     }
 }
