@@ -133,11 +133,11 @@ enum KeyFigure {
     }
 
     /**
-     * How far a closed form may lie from the computed value, in SI. The winding temperature is computed to five thousandths of a kelvin; its cell then holds the form's own
+     * How far a closed form may lie from the computed value, in SI. The winding temperature is computed to a thousandth of a kelvin; its cell then holds the form's own
      * value, so that what follows from it on the sheet does too.
      */
     double tolerance(double value) {
-        return this == WINDING_TEMPERATURE ? 1e-2 : AGREEMENT * Math.abs(value);
+        return this == WINDING_TEMPERATURE ? 2e-3 : AGREEMENT * Math.abs(value);
     }
 
     /** The closed form, or {@code null}. */

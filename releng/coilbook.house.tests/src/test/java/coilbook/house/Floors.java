@@ -31,7 +31,7 @@ final class Floors {
             new Rule("no internals of the platform", bundle -> false, "org.eclipse.e4.ui.internal", "org.eclipse.core.internal",
                     "org.eclipse.equinox.internal", "org.eclipse.swt.internal", "org.eclipse.jface.internal", "sun.", "com.sun."));
 
-    /** Internals of the platform that may be used, each with its reason in {@code releng/decisions/platform-internals.md}. */
+    /** Internals of the platform that may be used, each with its reason in {@code releng/decisions/09-platform-internals.md}. */
     private static final Map<String, String> PERMITTED = Map.of("org.eclipse.e4.ui.internal.workbench.swt.IEventLoopAdvisor",
             "coilbook.workbench");
 
