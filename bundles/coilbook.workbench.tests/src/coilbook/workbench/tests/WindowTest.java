@@ -1,5 +1,7 @@
 package coilbook.workbench.tests;
 
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 import static org.junit.jupiter.api.DynamicTest.dynamicTest;
 
 import java.nio.file.Path;
@@ -15,6 +17,8 @@ import org.junit.jupiter.api.io.TempDir;
 
 import coilbook.workbench.internal.model.Fleets;
 import coilbook.workbench.internal.model.Session;
+import coilbook.workbench.internal.window.WindowState;
+import coilbook.workbench.tests.fake.FakeFleet;
 import coilbook.workbench.tests.fake.StoryFleets;
 import coilbook.workbench.tests.story.EditStory;
 import coilbook.workbench.tests.story.ErrorsStory;
@@ -39,7 +43,8 @@ class WindowTest {
         List<Story> stories = List.of(edit, new RefusedStory(), new SortFilterStory(), new ErrorsStory(), new LargeFleetStory(),
                 new LayoutStory());
         Map<Story, Throwable> failures = new LinkedHashMap<>();
-        WindowRun.run(new StoryFleets(Services.get(Fleets.class), folder), window -> {
+        StoryFleets fleets = new StoryFleets(Services.get(Fleets.class), folder);
+        WindowRun.run(fleets, window -> {
             NatTable grid = window.grid();
             Session session = window.service(Session.class);
             window.await("the person's own register is shown", () -> session.station() != null && grid.getRowCount() > 5);
@@ -55,6 +60,10 @@ class WindowTest {
             if (failures.containsKey(story)) {
                 throw failures.get(story);
             }
-        })), Stream.of(dynamicTest("what was typed is in the file", () -> edit.checkFile(base))));
+        })), Stream.of(dynamicTest("what was typed is in the file", () -> edit.checkFile(base)),
+                dynamicTest("the window lets go of the fleet and remembers its place", () -> {
+                    assertTrue(((FakeFleet) fleets.last()).isClosed());
+                    assertEquals("dark", new WindowState(folder.resolve("window.properties")).word("look", ""));
+                })));
     }
 }

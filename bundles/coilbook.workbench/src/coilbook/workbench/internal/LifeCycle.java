@@ -1,7 +1,10 @@
 package coilbook.workbench.internal;
 
 import java.nio.file.Path;
+import java.util.logging.Level;
+import java.util.logging.Logger;
 
+import org.eclipse.core.runtime.jobs.Job;
 import org.eclipse.e4.core.contexts.IEclipseContext;
 import org.eclipse.e4.core.services.events.IEventBroker;
 import org.eclipse.e4.ui.di.UISynchronize;
@@ -14,6 +17,7 @@ import org.eclipse.e4.ui.workbench.lifecycle.ProcessAdditions;
 import org.eclipse.e4.ui.workbench.modeling.EModelService;
 import org.eclipse.swt.widgets.Display;
 
+import coilbook.fleet.CoilbookException;
 import coilbook.workbench.internal.model.Background;
 import coilbook.workbench.internal.model.FleetWork;
 import coilbook.workbench.internal.model.Fleets;
@@ -31,6 +35,10 @@ import coilbook.workbench.internal.window.WindowState;
 /** Wires what the parts share into the application's context, before any of them is made. */
 @SuppressWarnings("restriction")
 public final class LifeCycle {
+
+    private static final Logger LOG = Logger.getLogger(LifeCycle.class.getName());
+    private static final long LONGEST_END_MS = 20_000;
+    private static final long POLL_MS = 20;
 
     private WindowFrame frame;
 
@@ -71,7 +79,19 @@ public final class LifeCycle {
     }
 
     @PreSave
-    void remember() {
+    void end(Session session) throws InterruptedException {
         frame.remember();
+        Job.getJobManager().cancel(JobBackground.class);
+        long end = System.currentTimeMillis() + LONGEST_END_MS;
+        while (Job.getJobManager().find(JobBackground.class).length > 0 && System.currentTimeMillis() < end) {
+            Thread.sleep(POLL_MS);
+        }
+        if (session.fleet() != null) {
+            try {
+                session.fleet().close();
+            } catch (CoilbookException e) {
+                LOG.log(Level.WARNING, "The register was not closed in order; what was recorded is safe", e);
+            }
+        }
     }
 }

@@ -41,6 +41,7 @@ public final class FakeFleet implements FleetModel {
     }
 
     private final String name;
+    private volatile boolean closed;
     private final boolean longNames;
     private final String[] coils;
     private final Deque<Step> done = new ArrayDeque<>();
@@ -73,6 +74,10 @@ public final class FakeFleet implements FleetModel {
     @Override
     public long bringUpToDate(Progress progress) {
         return 0;
+    }
+
+    public boolean isClosed() {
+        return closed;
     }
 
     private String customer(int i) {
@@ -281,6 +286,6 @@ public final class FakeFleet implements FleetModel {
 
     @Override
     public void close() {
-        done.clear();
+        closed = true;
     }
 }

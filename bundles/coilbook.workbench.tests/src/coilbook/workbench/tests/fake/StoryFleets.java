@@ -13,6 +13,7 @@ public final class StoryFleets implements Fleets {
     private final Fleets real;
     private final FakeFleets invented;
     private final Path folder;
+    private volatile FleetModel last;
 
     public StoryFleets(Fleets real, Path folder) {
         this.real = real;
@@ -37,7 +38,13 @@ public final class StoryFleets implements Fleets {
 
     @Override
     public FleetModel open(Path base, boolean create, Progress progress) throws CoilbookException {
-        return base.isAbsolute() ? real.open(base, create, progress) : invented.open(base, create, progress);
+        last = base.isAbsolute() ? real.open(base, create, progress) : invented.open(base, create, progress);
+        return last;
+    }
+
+    /** The fleet that was opened last. */
+    public FleetModel last() {
+        return last;
     }
 
     @Override

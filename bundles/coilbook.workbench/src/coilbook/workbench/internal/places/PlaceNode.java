@@ -48,6 +48,11 @@ public record PlaceNode(String name, String key, FleetScope scope, Status.Counts
         return new PlaceNode(all, "", FleetScope.all(), total, customers);
     }
 
+    /** Words in place of a tree that could not be read. */
+    static PlaceNode note(String words) {
+        return new PlaceNode(words, "note", FleetScope.all(), new Status.Counts(0, 0, 0, 0, 0, 0), List.of());
+    }
+
     private static PlaceNode customer(String code, Status.Counts counts, String nobody) {
         FleetScope scope = new FleetScope(List.of(code), List.of(), List.of(), List.of());
         return new PlaceNode(code.isEmpty() ? nobody : code, "c" + code, scope, counts, new ArrayList<>());

@@ -105,6 +105,7 @@ public final class PlacesPart implements PlacesPresenter.View {
             viewer.setInput(null);
             return;
         }
+        viewer.getTree().setToolTipText(null);
         Object[] open = viewer.getExpandedElements();
         Object selected = viewer.getStructuredSelection().getFirstElement();
         boolean first = viewer.getInput() == null;
@@ -132,7 +133,7 @@ public final class PlacesPart implements PlacesPresenter.View {
     @Override
     public void failed(String words) {
         if (!viewer.getTree().isDisposed()) {
-            viewer.setInput(null);
+            viewer.setInput(new PlaceNode[] { PlaceNode.note(words) });
             viewer.getTree().setToolTipText(words);
         }
     }

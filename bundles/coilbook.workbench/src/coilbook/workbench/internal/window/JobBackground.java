@@ -1,6 +1,8 @@
 package coilbook.workbench.internal.window;
 
 import java.util.function.Consumer;
+import java.util.logging.Level;
+import java.util.logging.Logger;
 
 import org.eclipse.core.runtime.IProgressMonitor;
 import org.eclipse.core.runtime.IStatus;
@@ -17,6 +19,8 @@ import coilbook.workbench.internal.text.Texts;
 
 /** Background work as platform jobs. */
 public final class JobBackground implements Background {
+
+    private static final Logger LOG = Logger.getLogger(JobBackground.class.getName());
 
     /** Work that writes waits for work that writes. */
     private static final class OneAtATime implements ISchedulingRule {
@@ -88,6 +92,9 @@ public final class JobBackground implements Background {
                 T result = task.run(progress);
                 tell(() -> done.accept(result));
             } catch (CoilbookException e) {
+                if (e.getCause() != null) {
+                    LOG.log(Level.WARNING, getName(), e);
+                }
                 tell(() -> failed.accept(e));
             } catch (RuntimeException | Error e) {
                 uncaught.accept(e);
