@@ -27,6 +27,7 @@ import coilbook.workbench.internal.statusline.RowCounts;
 import coilbook.workbench.internal.window.EventLoop;
 import coilbook.workbench.internal.window.FileQuestions;
 import coilbook.workbench.internal.window.JobBackground;
+import coilbook.workbench.internal.window.LogFile;
 import coilbook.workbench.internal.window.Look;
 import coilbook.workbench.internal.window.UncaughtErrors;
 import coilbook.workbench.internal.window.WindowFrame;
@@ -40,12 +41,14 @@ public final class LifeCycle {
     private static final long LONGEST_END_MS = 20_000;
     private static final long POLL_MS = 20;
 
+    private LogFile log;
     private WindowFrame frame;
 
     @PostContextCreate
     void wire(IEclipseContext context, Display display, UISynchronize window, Fleets fleets) {
         Display.setAppName(WorkbenchIds.NAME);
-        UncaughtErrors errors = UncaughtErrors.install(display);
+        log = new LogFile(fleets.dataFolder());
+        UncaughtErrors errors = UncaughtErrors.install(display, log.place());
         WindowState state = new WindowState(settings(fleets));
         Session session = new Session();
         RunningWork running = new RunningWork();
@@ -93,5 +96,6 @@ public final class LifeCycle {
                 LOG.log(Level.WARNING, "The register was not closed in order; what was recorded is safe", e);
             }
         }
+        log.close();
     }
 }

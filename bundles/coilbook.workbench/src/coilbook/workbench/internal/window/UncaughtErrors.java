@@ -18,16 +18,22 @@ public final class UncaughtErrors implements Consumer<Throwable> {
     private static final int HEX = 36;
 
     private final Display display;
+    private final String log;
     private final Texts texts = Texts.of(UncaughtErrors.class);
     private final AtomicBoolean showing = new AtomicBoolean();
 
-    private UncaughtErrors(Display display) {
+    private UncaughtErrors(Display display, String log) {
         this.display = display;
+        this.log = log;
     }
 
-    /** Catches what the window's own thread lets through. */
-    public static UncaughtErrors install(Display display) {
-        UncaughtErrors errors = new UncaughtErrors(display);
+    /**
+     * Catches what the window's own thread lets through.
+     *
+     * @param log where the log is, in words; may be empty
+     */
+    public static UncaughtErrors install(Display display, String log) {
+        UncaughtErrors errors = new UncaughtErrors(display, log);
         display.setRuntimeExceptionHandler(errors::accept);
         display.setErrorHandler(error -> {
             errors.accept(error);
@@ -46,7 +52,7 @@ public final class UncaughtErrors implements Consumer<Throwable> {
         if (!display.isDisposed() && showing.compareAndSet(false, true)) {
             display.asyncExec(() -> {
                 try {
-                    MessageDialog.openError(display.getActiveShell(), texts.get("error.title"), texts.get("error.text", id));
+                    MessageDialog.openError(display.getActiveShell(), texts.get("error.title"), texts.get("error.text", id, log));
                 } finally {
                     showing.set(false);
                 }
