@@ -5,6 +5,8 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.function.Function;
+import java.util.logging.Level;
+import java.util.logging.Logger;
 import java.util.stream.Collectors;
 
 import coilbook.charts.WaveformPlot;
@@ -39,6 +41,8 @@ import coilbook.workbench.internal.text.Texts;
 
 /** An open register as the window sees it. */
 final class RegisterFleet implements FleetModel {
+
+    private static final Logger LOG = Logger.getLogger(RegisterFleet.class.getName());
 
     private final String name;
     private final Register register;
@@ -92,7 +96,14 @@ final class RegisterFleet implements FleetModel {
 
     @Override
     public List<Status.Place> places() throws CoilbookException {
-        return register.status().places();
+        try {
+            return register.status().places();
+        } catch (CoilbookException e) {
+            // Right after a large file is opened the database tidies it up, and a scan of all rows can find a part moved away ("chunk not found",
+            // seen with 100,000 stations); the same scan begun afterwards is right.
+            LOG.log(Level.WARNING, "The places are read once more", e);
+            return register.status().places();
+        }
     }
 
     @Override
