@@ -80,8 +80,9 @@ public final class RegisterStore {
     private long write(Change change, Map<String, Long> identities, long compensates, Progress progress, Recorded recorded)
             throws SQLException, CoilbookException {
         room.check(change.rows().size());
+        JournalEntry before = last;
         JournalEntry entry = database.<JournalEntry, CoilbookException>inTransaction(
-                connection -> new ChangeWriter(codecs, journal, connection, change, identities, last, progress).write(compensates));
+                connection -> new ChangeWriter(codecs, journal, connection, change, identities, before, progress).write(compensates));
         database.forceToDisk();
         last = entry;
         recorded.take(entry.seq(), change);
